@@ -1,0 +1,62 @@
+#!/usr/bin/env node
+import { readFileSync } from 'node:fs';
+import { exit, stderr, stdout } from 'node:process';
+
+const usage = `Usage: steelyard-calc <appraise|explain> <request.json|-> [--lines]
+
+  appraise   the appraisal of a request: sizes, power, money, months, cautions
+  explain    the working of a request, step by step
+
+  -          reads the request from standard input
+  --lines    answers an array of requests with one JSON line each
+`;
+
+function fail(error) {
+  stderr.write(`${JSON.stringify({ error })}\n`);
+  exit(2);
+}
+
+const words = process.argv.slice(2);
+const lines = words.includes('--lines');
+const [command, file, ...rest] = words.filter((word) => word !== '--lines');
+if (words.includes('--help') || words.includes('-h')) {
+  stdout.write(usage);
+  exit(0);
+}
+if (!['appraise', 'explain'].includes(command ?? '') || file === undefined || rest.length > 0) {
+  stderr.write(usage);
+  exit(2);
+}
+
+const calc = await import('../dist/index.js').catch(() => {
+  stderr.write('The calculation is not built yet: run "npm run build -w @steelyard/calc" first.\n');
+  exit(1);
+});
+
+let input;
+try {
+  input = JSON.parse(readFileSync(file === '-' ? 0 : file, 'utf8'));
+} catch (error) {
+  fail({ code: 'schema', path: '', message: `The request cannot be read as JSON: ${error.message}` });
+}
+
+function answer(request, index) {
+  try {
+    return calc[command](request);
+  } catch (error) {
+    if (!(error instanceof calc.CalcError)) throw error;
+    const { code, path, message } = error;
+    return fail({ code, path: index === undefined ? path : `${index}.${path}`, message });
+  }
+}
+
+if (Array.isArray(input)) {
+  const answers = input.map(answer);
+  stdout.write(
+    lines
+      ? answers.map((each) => `${JSON.stringify(each)}\n`).join('')
+      : `${JSON.stringify(answers, null, 2)}\n`,
+  );
+} else {
+  stdout.write(`${JSON.stringify(answer(input), null, lines ? 0 : 2)}\n`);
+}

@@ -1,0 +1,33 @@
+/** The uncertain inputs a study keeps in its ledger; each family names which of them it draws on. */
+export const planningValueKeys = [
+  'sd',
+  'sdActive',
+  'controlProportion',
+  'baselineCorrelation',
+  'withinPersonCorrelation',
+  'icc',
+  'clusterSizeCv',
+  'attrition',
+  'clusterAttrition',
+  'contamination',
+  'nonAdherence',
+] as const;
+
+export type PlanningValueKey = (typeof planningValueKeys)[number];
+
+/** `outcome` is the outcome's own unit, `proportion` runs from 0 to 1, `number` has no unit. */
+export type PlanningValueUnit = 'outcome' | 'proportion' | 'number';
+
+export const planningValueTraits: Record<PlanningValueKey, { label: string; unit: PlanningValueUnit }> = {
+  sd: { label: 'Standard deviation', unit: 'outcome' },
+  sdActive: { label: 'Standard deviation, active arm', unit: 'outcome' },
+  controlProportion: { label: 'Control proportion', unit: 'proportion' },
+  baselineCorrelation: { label: 'Correlation with baseline', unit: 'number' },
+  withinPersonCorrelation: { label: 'Within-person correlation', unit: 'number' },
+  icc: { label: 'ICC', unit: 'number' },
+  clusterSizeCv: { label: 'CV of cluster size', unit: 'number' },
+  attrition: { label: 'Attrition', unit: 'proportion' },
+  clusterAttrition: { label: 'Loss of whole clusters', unit: 'proportion' },
+  contamination: { label: 'Contamination', unit: 'proportion' },
+  nonAdherence: { label: 'Non-adherence', unit: 'proportion' },
+};

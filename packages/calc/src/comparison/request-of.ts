@@ -1,0 +1,115 @@
+import { type FamilyId, familyOf } from '../designs/registry.js';
+import type { Aim, RequestFor } from '../request.js';
+import type { PlanningValueKey } from './planning-values.js';
+import type { Hold, LedgerEntry, OptionPlan, QuestionPlan, StudyCosts } from './study-plan.js';
+
+export interface Study {
+  question: QuestionPlan;
+  ledger: readonly LedgerEntry[];
+  costs: StudyCosts | null;
+  hold: Hold;
+}
+
+/** A planning value as one option takes it: from its override, else its family's ledger line, else the general one. */
+export function planningValueFor(
+  key: PlanningValueKey,
+  { family, overrides }: Pick<OptionPlan, 'family' | 'overrides'>,
+  ledger: readonly LedgerEntry[],
+): number | undefined {
+  const line = (of: FamilyId | null) =>
+    ledger.find((entry) => entry.key === key && entry.family === of)?.value;
+  return overrides[key]?.value ?? line(family) ?? line(null);
+}
+
+/** Where a family's planning values go in its requests. */
+export function planningValuesOf(family: FamilyId): readonly { path: string; key: PlanningValueKey }[] {
+  return familyOf(family).planningValues;
+}
+
+/**
+ * The request that one option of a study comes to: structure and size from the option, the question from the
+ * study, whatever is uncertain from the ledger. Unchecked: `appraise` names what is missing.
+ */
+export function requestOf(study: Study, option: OptionPlan): RequestFor<unknown> {
+  const request: Record<string, Record<string, unknown>> = {
+    outcome: outcomeOf(study, option),
+    test: { ...study.question.test },
+    design: {
+      family: option.family,
+      ...option.structure,
+      ...(option.clusterSize === undefined ? {} : { clusterSize: option.clusterSize }),
+    },
+    aim: aimOf(study.hold, option),
+    ...moneyOf(study, option),
+  };
+  for (const { path, key } of planningValuesOf(option.family)) {
+    const value = planningValueFor(key, option, study.ledger);
+    if (value !== undefined) place(request, path, value);
+  }
+  if (study.question.outcome.kind === 'binary') {
+    const { control, ...rest } = request.outcome as { control?: number };
+    request.outcome = {
+      ...rest,
+      control,
+      active: (control ?? Number.NaN) + study.question.outcome.difference,
+    };
+  }
+  return request as unknown as RequestFor<unknown>;
+}
+
+/** Puts a value where its parent exists; `attrition` and `dilution` are made when first needed. */
+function place(request: Record<string, Record<string, unknown>>, path: string, value: number): void {
+  const keys = path.split('.');
+  const leaf = keys.pop() as string;
+  const [part, ...inner] = keys as [string, ...string[]];
+  if (part === 'outcome' && inner.length === 0 && !takes(request.outcome?.kind, leaf, request.outcome))
+    return;
+  request[part] ??= {};
+  let parent: Record<string, unknown> | undefined = request[part];
+  for (const key of inner) parent = parent?.[key] as Record<string, unknown> | undefined;
+  if (parent) parent[leaf] = value;
+}
+
+const outcomeValues: Record<string, readonly string[]> = {
+  continuous: ['sd', 'sdActive'],
+  binary: ['control'],
+};
+
+/** Whether an outcome has this planning value; unequal SDs give way to repeated measurements. */
+function takes(kind: unknown, leaf: string, outcome: Record<string, unknown> | undefined): boolean {
+  if (leaf === 'sdActive' && outcome?.repeated) return false;
+  return outcomeValues[kind as string]?.includes(leaf) ?? false;
+}
+
+function outcomeOf({ question }: Study, { repeated }: OptionPlan): Record<string, unknown> {
+  const { outcome } = question;
+  if (outcome.kind === 'continuous')
+    return { ...outcome, ...(repeated ? { repeated: { ...repeated } } : {}) };
+  const { difference: _, ...rest } = outcome;
+  return rest;
+}
+
+function aimOf(hold: Hold, option: OptionPlan): Aim {
+  return hold.kind === 'power'
+    ? { find: 'size', power: hold.power }
+    : { find: 'power', units: option.units ?? Number.NaN };
+}
+
+/** The study's costs by treatment, narrowed to those this option compares. */
+function moneyOf(
+  { costs }: Study,
+  { treatments }: OptionPlan,
+): Pick<RequestFor<unknown>, 'costs' | 'timeline'> {
+  if (!costs) return {};
+  const ofTreatments = (figures: readonly number[]) =>
+    treatments.map((treatment) => figures[treatment] ?? Number.NaN);
+  const { perExposure, perClusterPeriod, ...rest } = costs.costs;
+  return {
+    costs: {
+      ...rest,
+      ...(perExposure ? { perExposure: ofTreatments(perExposure) } : {}),
+      ...(perClusterPeriod ? { perClusterPeriod: ofTreatments(perClusterPeriod) } : {}),
+    },
+    timeline: costs.timeline,
+  };
+}

@@ -1,0 +1,66 @@
+import { z } from 'zod';
+import { familyIds } from '../designs/registry.js';
+import { costPlanSchema, quantity, testSchema, timelinePlanSchema, wholeNumber } from '../request.js';
+import { planningValueKeys } from './planning-values.js';
+
+/** What the study asks: the outcome with its target difference, and the test. The rest comes from the ledger. */
+export const questionOutcomeSchema = z.discriminatedUnion('kind', [
+  z.strictObject({
+    kind: z.literal('continuous'),
+    difference: quantity('The target difference'),
+    better: z.enum(['higher', 'lower']).optional(),
+  }),
+  z.strictObject({
+    kind: z.literal('binary'),
+    /** active − control proportion */
+    difference: quantity('The target difference', -1, 1),
+    method: z.enum(['pooled', 'unpooled', 'continuity-corrected', 'arcsine']).optional(),
+    better: z.enum(['higher', 'lower']).optional(),
+  }),
+]);
+
+export const holdSchema = z.discriminatedUnion('kind', [
+  z.strictObject({ kind: z.literal('power'), power: z.number().gt(0).lt(1) }),
+  z.strictObject({ kind: z.literal('sizes'), power: z.number().gt(0).lt(1) }),
+]);
+
+const overrideSchema = z.strictObject({ value: z.number(), reason: z.string().min(1) });
+
+/** A candidate design as it is stored: structure and size; whatever is uncertain comes from the ledger. */
+export const optionPlanSchema = z.strictObject({
+  family: z.enum(familyIds),
+  /** Which of the study's treatments it compares, control first, as indices into the study's list. */
+  treatments: z.array(wholeNumber('A treatment', 0)).min(2),
+  /** The structural part of the family's design; the family's own schema checks it once completed. */
+  structure: z.record(z.string(), z.unknown()),
+  /** Baselines and follow-ups of a repeatedly measured continuous outcome. */
+  repeated: z
+    .strictObject({
+      baselines: wholeNumber('The number of baselines', 0),
+      followUps: wholeNumber('The number of follow-ups', 1),
+    })
+    .optional(),
+  /** Units and cluster size as entered: what the hold "sizes" keeps. */
+  units: wholeNumber('The number of units', 1).optional(),
+  clusterSize: wholeNumber('The cluster size', 1).optional(),
+  overrides: z.partialRecord(z.enum(planningValueKeys), overrideSchema),
+});
+
+/** A ledger line as the comparison needs it; one with a family speaks for that family alone. */
+export const ledgerEntrySchema = z.strictObject({
+  key: z.enum(planningValueKeys),
+  family: z.enum(familyIds).nullable(),
+  value: z.number(),
+});
+
+/** Money and months; `perExposure` and `perClusterPeriod` go by the study's list of treatments. */
+export const studyCostsSchema = z.strictObject({ costs: costPlanSchema, timeline: timelinePlanSchema });
+
+export type QuestionOutcome = z.infer<typeof questionOutcomeSchema>;
+export type Hold = z.infer<typeof holdSchema>;
+export type OptionPlan = z.infer<typeof optionPlanSchema>;
+export type LedgerEntry = z.infer<typeof ledgerEntrySchema>;
+export type StudyCosts = z.infer<typeof studyCostsSchema>;
+
+export const questionPlanSchema = z.strictObject({ outcome: questionOutcomeSchema, test: testSchema });
+export type QuestionPlan = z.infer<typeof questionPlanSchema>;

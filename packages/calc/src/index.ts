@@ -1,0 +1,59 @@
+export type {
+  Appraisal,
+  ArmLoad,
+  Caution,
+  CautionCode,
+  ComparisonResult,
+  CostLine,
+  CostSheet,
+  CurvePoint,
+  Feasible,
+  Group,
+  Infeasible,
+  Step,
+  Timeline,
+} from './appraisal.js';
+export { appraise } from './appraise.js';
+export {
+  type PlanningValueKey,
+  type PlanningValueUnit,
+  planningValueKeys,
+  planningValueTraits,
+} from './comparison/planning-values.js';
+export { planningValueFor, planningValuesOf, requestOf, type Study } from './comparison/request-of.js';
+export {
+  type Hold,
+  holdSchema,
+  type LedgerEntry,
+  ledgerEntrySchema,
+  type OptionPlan,
+  optionPlanSchema,
+  type QuestionOutcome,
+  type QuestionPlan,
+  questionOutcomeSchema,
+  questionPlanSchema,
+  type StudyCosts,
+  studyCostsSchema,
+} from './comparison/study-plan.js';
+export { money, type Noun, type Verdict, type VerdictWords, verdict } from './comparison/verdict.js';
+export { letterOf, type WeighedOption, type WeighInput, weigh } from './comparison/weigh.js';
+export { type CurveSpec, curve } from './curve.js';
+export { type Design, type FamilyId, families, familyIds } from './designs/registry.js';
+export { CalcError, type CalcErrorCode, calcErrorCodes } from './errors.js';
+export { explain } from './explain.js';
+export { type AppraisalRequest, appraisalRequestSchema, parseRequest } from './parse-request.js';
+export {
+  type Aim,
+  type Attrition,
+  type Comparisons,
+  type CostPlan,
+  costPlanSchema,
+  type Dilution,
+  type Hypothesis,
+  type Outcome,
+  type OutcomeKind,
+  type TestPlan,
+  type TimelinePlan,
+  testSchema,
+  timelinePlanSchema,
+} from './request.js';

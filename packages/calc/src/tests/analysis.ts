@@ -1,0 +1,18 @@
+/** What a design makes of an outcome at one size: a df (null: normal reference) and the comparisons tested. */
+export interface Analysis {
+  df: number | null;
+  contrasts: Contrast[];
+}
+
+export interface Contrast {
+  arm: number;
+  versus: number;
+  /** Analysis scale, signed: arm − versus. */
+  effect: number;
+  /** Under the alternative. */
+  standardError: number;
+  /** Under no difference, where the test uses it. */
+  nullStandardError?: number;
+  /** Taken off |effect| by a continuity correction. */
+  correction?: number;
+}

@@ -1,0 +1,137 @@
+import { describe, expect, it } from 'vitest';
+import { type AppraisalRequest, appraise, CalcError, type CalcErrorCode } from '../src/index.js';
+import { abba, clusters, threeArms, twoMeans, twoProportions } from './requests.js';
+
+/** The request with one field, given by its path, set to a value. */
+function withField(request: AppraisalRequest, path: string, value: unknown): AppraisalRequest {
+  const copy = structuredClone(request) as unknown as Record<string, unknown>;
+  const keys = path.split('.');
+  const leaf = keys.pop() as string;
+  let parent = copy;
+  for (const key of keys) {
+    parent[key] ??= {};
+    parent = parent[key] as Record<string, unknown>;
+  }
+  parent[leaf] = value;
+  return copy as unknown as AppraisalRequest;
+}
+
+function errorOf(request: unknown): CalcError {
+  try {
+    appraise(request as AppraisalRequest);
+  } catch (error) {
+    if (error instanceof CalcError) return error;
+    throw error;
+  }
+  throw new Error('no error was raised');
+}
+
+const faults: [AppraisalRequest, string, unknown, CalcErrorCode][] = [
+  [twoMeans, 'outcome.sd', 0, 'schema'],
+  [twoMeans, 'outcome.sd', -1, 'schema'],
+  [twoMeans, 'outcome.sd', '10', 'schema'],
+  [twoMeans, 'outcome.sd', undefined, 'schema'],
+  [twoMeans, 'outcome.sd', Number.NaN, 'schema'],
+  [twoMeans, 'outcome.sd', Number.POSITIVE_INFINITY, 'schema'],
+  [twoMeans, 'outcome.difference', 0, 'no-effect'],
+  [twoMeans, 'outcome.sdactive', 3, 'schema'],
+  [twoMeans, 'outcome', { kind: 'ordinal', controlProbabilities: [0.5, 0.5], oddsRatio: 2 }, 'unsupported'],
+  [twoMeans, 'outcome.kind', 'ordinary', 'schema'],
+  [twoMeans, 'test.alpha', 0, 'schema'],
+  [twoMeans, 'test.alpha', 0.6, 'schema'],
+  [twoMeans, 'test.sides', 3, 'schema'],
+  [twoMeans, 'test.hypothesis', 'equivalence', 'unsupported'],
+  [twoMeans, 'test.margin', 1, 'unsupported'],
+  [twoMeans, 'aim.power', 1, 'schema'],
+  [twoMeans, 'aim.power', 0.02, 'schema'],
+  [twoMeans, 'aim', { find: 'cluster-size', units: 10, power: 0.8 }, 'unsupported'],
+  [twoMeans, 'aim.find', 'budget', 'schema'],
+  [twoMeans, 'design.family', 'lattice', 'unsupported'],
+  [twoMeans, 'design.family', 'constructor', 'unsupported'],
+  [twoMeans, 'design.allocation', [1], 'schema'],
+  [twoMeans, 'design.allocation', [1, -1], 'schema'],
+  [twoMeans, 'design.allocation', [1, 5000], 'schema'],
+  [twoMeans, 'design.clusterSizeCv', 0.4, 'schema'],
+  [twoMeans, 'attrition.participants', 1, 'schema'],
+  [twoMeans, 'attrition.participants', -0.1, 'schema'],
+  [twoMeans, 'attrition.units', 0.1, 'unsupported'],
+  [twoMeans, 'dilution.contamination', 1, 'schema'],
+  [twoMeans, 'costs', { currency: 'EUR', perExposure: [1, 2, 3] }, 'schema'],
+  [twoMeans, 'timeline', { accrualPerMonth: 3, accrualPerClusterPerMonth: 2 }, 'schema'],
+  [twoMeans, 'outcome.repeated', { baselines: 1, followUps: 2, correlation: -0.6 }, 'impossible-correlation'],
+  [twoProportions, 'outcome.active', 0.3, 'no-effect'],
+  [twoProportions, 'outcome.active', 1, 'schema'],
+  [twoProportions, 'outcome.control', 0, 'schema'],
+  [twoProportions, 'test.reference', 't', 'unsupported'],
+  [twoProportions, 'outcome.method', 'exact', 'schema'],
+  [abba, 'design.correlation', 1, 'schema'],
+  [abba, 'design.correlation', undefined, 'schema'],
+  [abba, 'design.sequences', ['AB', 'AB'], 'unsupported'],
+  [abba, 'design.sequences', ['ab', 'BA'], 'schema'],
+  [abba, 'design.carryover', true, 'not-estimable'],
+  [abba, 'outcome.sdActive', 3, 'unsupported'],
+  [clusters, 'design.icc', 1.2, 'schema'],
+  [clusters, 'design.icc', undefined, 'schema'],
+  [clusters, 'design.clusterSize', 2.5, 'schema'],
+  [clusters, 'design.clusterSize', 0, 'schema'],
+  [clusters, 'design.allocation', [1, 1, 1], 'unsupported'],
+  [clusters, 'outcome.sdActive', 3, 'unsupported'],
+  [threeArms, 'design.comparisons.adjust', 'holm', 'unsupported'],
+  [threeArms, 'design.comparisons.powerGoal', 'conjunctive', 'unsupported'],
+  [threeArms, 'design.comparisons.against', 'all-pairs', 'unsupported'],
+  [threeArms, 'design.comparisons.effects', [5], 'schema'],
+  [threeArms, 'outcome.sdActive', 3, 'unsupported'],
+  [threeArms, 'design.allocation', [1, 1], 'schema'],
+];
+
+describe('a request that breaks a bound', () => {
+  it.each(faults)('is refused at its field, fault %#', (request, path, value, code) => {
+    const error = errorOf(withField(request, path, value));
+    expect(error.code).toBe(code);
+    expect(error.path.startsWith(path), `${error.path} for ${path}`).toBe(true);
+    expect(error.message).toMatch(/[.]$/);
+  });
+
+  it('is refused when it asks for fewer units than can be analysed', () => {
+    const error = errorOf({ ...twoMeans, aim: { find: 'power', units: 1 } });
+    expect([error.code, error.path]).toEqual(['too-few-units', 'aim.units']);
+  });
+
+  it('is refused when it is no object at all', () => {
+    for (const junk of [null, undefined, 3, 'a', [], {}]) expect(errorOf(junk).code).toBe('schema');
+  });
+});
+
+describe('an aim out of reach', () => {
+  it('answers with the limiting power and the fewest clusters that would do', () => {
+    const appraisal = appraise({
+      ...clusters,
+      design: { family: 'cluster', icc: 0.3, clusterSize: 1 },
+      aim: { find: 'cluster-size', units: 10, power: 0.9 },
+    });
+    if (appraisal.feasible) throw new Error('expected no answer');
+    const { code, limitingPower, fewestUnits } = appraisal.infeasible;
+    expect(code).toBe('clusters');
+    expect(limitingPower).toBeLessThan(0.9);
+    const feasibleAt = (units: number) =>
+      appraise({
+        ...clusters,
+        design: { family: 'cluster', icc: 0.3, clusterSize: 1 },
+        aim: { find: 'cluster-size', units, power: 0.9 },
+      }).feasible;
+    expect([feasibleAt((fewestUnits as number) - 1), feasibleAt(fewestUnits as number)]).toEqual([
+      false,
+      true,
+    ]);
+  });
+
+  it('answers when no active proportion can be told from control at that size', () => {
+    const appraisal = appraise({ ...twoProportions, aim: { find: 'effect', units: 4, power: 0.95 } });
+    expect(appraisal).toMatchObject({ feasible: false, infeasible: { code: 'effect' } });
+  });
+
+  it('answers when the effect is too small for any size', () => {
+    const appraisal = appraise({ ...twoMeans, outcome: { kind: 'continuous', difference: 1e-9, sd: 1 } });
+    expect(appraisal).toMatchObject({ feasible: false, infeasible: { code: 'effect' } });
+  });
+});
