@@ -1,0 +1,4 @@
+import { Query } from '@nestjs/cqrs';
+import type { AccessView } from '../../contract/access.js';
+
+export class HowToEnter extends Query<AccessView> {}

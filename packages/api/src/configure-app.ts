@@ -1,0 +1,30 @@
+import type { NestApplicationOptions } from '@nestjs/common';
+import type { NestExpressApplication } from '@nestjs/platform-express';
+import compression from 'compression';
+import cookieParser from 'cookie-parser';
+import type { NextFunction, Request, Response } from 'express';
+import { serveOpenApi } from './open-api.js';
+import { securityHeaders } from './security-headers.js';
+import { appSettings, type Settings } from './settings/settings.js';
+import { serveWebBuild } from './web-build.js';
+
+/** Bodies are JSON alone; open connections do not hold up the end. */
+export const appOptions: NestApplicationOptions = { bodyParser: false, forceCloseConnections: true };
+
+/** What the running server and its tests have in common. */
+export function configureApp(app: NestExpressApplication, webBuild?: string): void {
+  const current = app.get<Settings>(appSettings.KEY);
+  // Behind TLS there is a proxy on this machine, which knows the address that attempts come from.
+  if (current.secureCookies) app.set('trust proxy', 'loopback');
+  app.use(securityHeaders(current));
+  app.use(compression());
+  app.use('/api', (_: Request, response: Response, next: NextFunction) => {
+    response.set('Cache-Control', 'no-store');
+    next();
+  });
+  app.use(cookieParser());
+  app.useBodyParser('json');
+  app.setGlobalPrefix('api');
+  serveOpenApi(app);
+  serveWebBuild(app, webBuild);
+}

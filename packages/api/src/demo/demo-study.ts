@@ -1,0 +1,20 @@
+import type { Hold, StudyCosts } from '@steelyard/calc';
+import type { z } from 'zod';
+import type { StudyRole } from '../contract/studies.js';
+import type { newOptionSchema } from '../design-sets/commands/add-option.command.js';
+import type { newStudySchema } from '../studies/commands/create-study.command.js';
+import type { newPlanningValueSchema } from '../studies/commands/set-planning-value.command.js';
+import type { DemoPersonKey } from './people.js';
+
+/** Something that was done some days before the seeding. */
+type Dated<T> = T & { daysAgo: number };
+
+/** A fictional study as its team entered it, step by step. */
+export interface DemoStudy {
+  study: Dated<Omit<z.input<typeof newStudySchema>, 'members' | 'fictional'>>;
+  team: Record<StudyRole, DemoPersonKey>;
+  planningValues: Dated<Omit<z.input<typeof newPlanningValueSchema>, 'version'>>[];
+  costPlan: Dated<StudyCosts>;
+  hold: Hold;
+  options: Dated<z.input<typeof newOptionSchema>>[];
+}

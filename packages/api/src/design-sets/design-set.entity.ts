@@ -1,0 +1,18 @@
+import { defineEntity, type InferEntity, p } from '@mikro-orm/sqlite';
+import type { Hold } from '@steelyard/calc';
+import { aggregateProperties } from '../common/base.entity.js';
+import { Study } from '../studies/study.entity.js';
+
+/** Options side by side, and what is held equal between them. */
+export const DesignSet = defineEntity({
+  name: 'DesignSet',
+  properties: {
+    ...aggregateProperties,
+    study: () => p.oneToOne(Study),
+    hold: p.json<Hold>(),
+    /** In the order that gives them their letters. */
+    optionIds: p.json<string[]>(),
+  },
+});
+
+export type DesignSet = InferEntity<typeof DesignSet>;

@@ -1,0 +1,4 @@
+import { Foundation } from './20251201-foundation.js';
+
+/** In the order in which they were written; a name once given stays. */
+export const migrations = [{ name: '20251201-foundation', class: Foundation }];

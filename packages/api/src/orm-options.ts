@@ -1,0 +1,48 @@
+import { Migrator } from '@mikro-orm/migrations';
+import { defineConfig, type EntitySchema } from '@mikro-orm/sqlite';
+import { Session } from './auth/session.entity.js';
+import { DesignSet } from './design-sets/design-set.entity.js';
+import { Option } from './design-sets/option.entity.js';
+import { migrations } from './migrations/migrations.js';
+import { Person } from './people/person.entity.js';
+import { CostPlan } from './studies/cost-plan.entity.js';
+import { Membership } from './studies/membership.entity.js';
+import { PlanningValue } from './studies/planning-value.entity.js';
+import { Study } from './studies/study.entity.js';
+
+/** Each after those it refers to. */
+export const entities: EntitySchema[] = [
+  Person,
+  Session,
+  Study,
+  Membership,
+  PlanningValue,
+  CostPlan,
+  DesignSet,
+  Option,
+];
+
+const pragmas = [
+  'pragma journal_mode = WAL',
+  'pragma synchronous = FULL',
+  'pragma foreign_keys = ON',
+  'pragma busy_timeout = 5000',
+].join(';');
+
+interface SqliteConnection {
+  exec(sql: string, done: (error: Error | null) => void): void;
+}
+
+export const ormOptions = (database: string) =>
+  defineConfig({
+    dbName: database,
+    entities,
+    extensions: [Migrator],
+    migrations: { migrationsList: migrations, snapshot: false, silent: true },
+    pool: {
+      min: 1,
+      max: 1,
+      afterCreate: (connection: SqliteConnection, done: (error: Error | null) => void) =>
+        connection.exec(pragmas, done),
+    },
+  });

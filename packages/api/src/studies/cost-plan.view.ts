@@ -1,0 +1,8 @@
+import type { CostPlanView } from '../contract/studies.js';
+import type { CostPlan } from './cost-plan.entity.js';
+
+export const costPlanView = ({ version, costs, timeline }: CostPlan): CostPlanView => ({
+  version,
+  costs,
+  timeline,
+});
