@@ -14,6 +14,7 @@ export type {
   Timeline,
 } from './appraisal.js';
 export { appraise } from './appraise.js';
+export { type LimitKey, type Limits, limitKeys, limitsSchema, type Use } from './comparison/limits.js';
 export {
   type PlanningValueKey,
   type PlanningValueUnit,
@@ -21,6 +22,7 @@ export {
   planningValueTraits,
 } from './comparison/planning-values.js';
 export { planningValueFor, planningValuesOf, requestOf, type Study } from './comparison/request-of.js';
+export type { Standing } from './comparison/standing.js';
 export {
   type Hold,
   holdSchema,
@@ -32,11 +34,14 @@ export {
   type QuestionPlan,
   questionOutcomeSchema,
   questionPlanSchema,
+  type Ruling,
+  rulingSchema,
   type StudyCosts,
   studyCostsSchema,
 } from './comparison/study-plan.js';
-export { money, type Noun, type Verdict, type VerdictWords, verdict } from './comparison/verdict.js';
+export { difference, type Verdict, type VerdictWords, verdict } from './comparison/verdict.js';
 export { letterOf, type WeighedOption, type WeighInput, weigh } from './comparison/weigh.js';
+export { money, type Noun } from './comparison/wording.js';
 export { type CurveSpec, curve } from './curve.js';
 export { type Design, type FamilyId, families, familyIds } from './designs/registry.js';
 export { CalcError, type CalcErrorCode, calcErrorCodes } from './errors.js';

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import {
+  appraise,
   type LedgerEntry,
   type OptionPlan,
   requestOf,
@@ -112,6 +113,108 @@ describe('weighing the options of a study', () => {
   });
 });
 
+/** An invented school study in clusters, with limits; figures computed in R, money and months by hand. */
+const schools: WeighInput = {
+  question: {
+    outcome: { kind: 'continuous', difference: 3 },
+    test: { hypothesis: 'superiority', alpha: 0.05, sides: 2 },
+  },
+  ledger: [
+    { key: 'sd', family: null, value: 13 },
+    { key: 'icc', family: null, value: 0.04 },
+    { key: 'clusterSizeCv', family: null, value: 0.35 },
+  ],
+  costs: {
+    costs: {
+      currency: 'EUR',
+      fixed: 240_000,
+      perMonth: 4200,
+      perCluster: 5500,
+      perClusterPeriod: [900, 4700],
+      perMeasurement: 22,
+    },
+    timeline: { startUp: 8, accrualPerClusterPerMonth: 40, followUp: 4, period: 4, closeOut: 4 },
+  },
+  hold: { kind: 'power', power: 0.8 },
+  limits: { clusters: 32, participantsPerCluster: 60, money: 800_000, months: 30 },
+  options: [{ id: '1', name: 'Cluster', plan: option({ family: 'cluster', clusterSize: 40 }) }],
+};
+const girls = {
+  hold: schools.hold,
+  currency: 'EUR',
+  participants: { one: 'girl', many: 'girls' },
+  clusters: { one: 'catchment', many: 'catchments' },
+};
+const standingIn = (study: WeighInput, position = 0) => {
+  const standing = weigh(study)[position]?.standing;
+  if (!standing) throw new Error('expected a standing');
+  return standing;
+};
+
+describe('an option against the limits', () => {
+  it('names the limit it breaks and by how much, and what the others leave', () => {
+    const { fits, breaches, uses } = standingIn(schools);
+    expect(fits).toBe(false);
+    expect(breaches).toEqual([{ limit: 'clusters', allowed: 32, taken: 44, over: 12 }]);
+    expect(uses.map(({ limit, over }) => [limit, Math.round(over)])).toEqual([
+      ['clusters', 12],
+      ['participantsPerCluster', -20],
+      ['money', -84_680],
+      ['months', -13],
+    ]);
+  });
+
+  it('gives the most power that the limits leave it', () => {
+    const { within } = standingIn(schools);
+    expect(within).toMatchObject({ clusters: 32, clusterSize: 60 });
+    expect(within?.power).toBeCloseTo(0.726, 3);
+    const { limits } = schools;
+    const narrow = standingIn({ ...schools, limits: { ...limits, participantsPerCluster: 40 } });
+    expect(narrow.within).toMatchObject({ clusters: 32, clusterSize: 40 });
+    expect(narrow.within?.power).toBeCloseTo(0.672, 3);
+  });
+
+  it('gives the smallest relaxation that would admit it, which larger clusters may make smaller', () => {
+    const { relaxation } = standingIn(schools);
+    const [change] = relaxation?.changes ?? [];
+    expect(relaxation?.clusterSize).toBe(60);
+    expect(change).toMatchObject({ limit: 'clusters', from: 32 });
+    const relaxed = (clusters: number) =>
+      standingIn({
+        ...schools,
+        limits: { ...schools.limits, clusters },
+        options: [{ id: '1', name: 'Cluster', plan: option({ family: 'cluster', clusterSize: 60 }) }],
+      }).fits;
+    const needed = change?.to as number;
+    expect(needed).toBeLessThan(44);
+    expect([relaxed(needed - 1), relaxed(needed)]).toEqual([false, true]);
+  });
+
+  it('fits when nothing is broken and the power is reached', () => {
+    const wide = standingIn({ ...schools, limits: { clusters: 44, money: 715_320, months: 17 } });
+    expect(wide).toMatchObject({ fits: true, breaches: [], within: null, relaxation: null });
+  });
+});
+
+describe('the hold of a budget', () => {
+  it('buys the most units whose cost stays within it', () => {
+    const hold = { kind: 'budget', power: 0.9, budget: 400_000 } as const;
+    for (const { appraisal, request } of weigh({ ...study, hold })) {
+      if (!appraisal?.feasible) throw new Error('expected an answer');
+      expect(appraisal.costs?.total).toBeLessThanOrEqual(400_000);
+      const more = appraise({ ...request, aim: { find: 'power', units: appraisal.units + 1 } });
+      if (!more.feasible) throw new Error('expected an answer');
+      expect(more.costs?.total).toBeGreaterThan(400_000);
+    }
+  });
+
+  it('says so where it buys nothing, and where there are no costs', () => {
+    const hold = { kind: 'budget', power: 0.9, budget: 1000 } as const;
+    expect(weigh({ ...study, hold })[0]?.error?.path).toBe('hold.budget');
+    expect(weigh({ ...study, hold, costs: null })[0]?.error?.path).toBe('costs');
+  });
+});
+
 describe('the verdict', () => {
   it('names the option ahead on every measure, and how far the others are behind', () => {
     expect(verdict(weigh(study), words)).toEqual({
@@ -137,5 +240,32 @@ describe('the verdict', () => {
     expect(verdict(none, words).detail).toMatch(
       /A cannot be computed: The standard deviation must be a number\./,
     );
+  });
+
+  it('names the only option that fits every limit, and why not the others', () => {
+    const two: WeighInput = {
+      ...schools,
+      limits: { clusters: 44, money: 700_000 },
+      options: [
+        ...schools.options,
+        { id: '2', name: 'Larger clusters', plan: option({ family: 'cluster', clusterSize: 60 }) },
+        {
+          id: '3',
+          name: 'Individuals',
+          plan: option({ family: 'parallel' }),
+          ruling: { kind: 'not-admissible', reason: 'shared canteen' },
+        },
+      ],
+    };
+    const { headline, detail } = verdict(weigh(two), girls);
+    expect(headline).toBe('Only B fits every limit.');
+    expect(detail).toBe('A costs 15\u202fk€ too much. C is ruled out.');
+  });
+
+  it('counts the clusters that do not exist in the words of the study', () => {
+    expect(verdict(weigh(schools), girls)).toEqual({
+      headline: 'A does not fit.',
+      detail: 'A needs 12 catchments that do not exist.',
+    });
   });
 });

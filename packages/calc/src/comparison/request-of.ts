@@ -1,5 +1,5 @@
 import { type FamilyId, familyOf } from '../designs/registry.js';
-import type { Aim, RequestFor } from '../request.js';
+import type { RequestFor } from '../request.js';
 import type { PlanningValueKey } from './planning-values.js';
 import type { Hold, LedgerEntry, OptionPlan, QuestionPlan, StudyCosts } from './study-plan.js';
 
@@ -27,8 +27,9 @@ export function planningValuesOf(family: FamilyId): readonly { path: string; key
 }
 
 /**
- * The request that one option of a study comes to: structure and size from the option, the question from the
- * study, whatever is uncertain from the ledger. Unchecked: `appraise` names what is missing.
+ * The request that one option of a study comes to, sized for the power that the study asks for: structure and
+ * cluster size from the option, the question from the study, whatever is uncertain from the ledger. Unchecked:
+ * `appraise` names what is missing.
  */
 export function requestOf(study: Study, option: OptionPlan): RequestFor<unknown> {
   const request: Record<string, Record<string, unknown>> = {
@@ -39,7 +40,7 @@ export function requestOf(study: Study, option: OptionPlan): RequestFor<unknown>
       ...option.structure,
       ...(option.clusterSize === undefined ? {} : { clusterSize: option.clusterSize }),
     },
-    aim: aimOf(study.hold, option),
+    aim: { find: 'size', power: study.hold.power },
     ...moneyOf(study, option),
   };
   for (const { path, key } of planningValuesOf(option.family)) {
@@ -87,12 +88,6 @@ function outcomeOf({ question }: Study, { repeated }: OptionPlan): Record<string
     return { ...outcome, ...(repeated ? { repeated: { ...repeated } } : {}) };
   const { difference: _, ...rest } = outcome;
   return rest;
-}
-
-function aimOf(hold: Hold, option: OptionPlan): Aim {
-  return hold.kind === 'power'
-    ? { find: 'size', power: hold.power }
-    : { find: 'power', units: option.units ?? Number.NaN };
 }
 
 /** The study's costs by treatment, narrowed to those this option compares. */

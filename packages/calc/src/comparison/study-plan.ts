@@ -1,6 +1,14 @@
 import { z } from 'zod';
 import { familyIds } from '../designs/registry.js';
-import { costPlanSchema, quantity, testSchema, timelinePlanSchema, wholeNumber } from '../request.js';
+import {
+  costPlanSchema,
+  openProportion,
+  positive,
+  quantity,
+  testSchema,
+  timelinePlanSchema,
+  wholeNumber,
+} from '../request.js';
 import { planningValueKeys } from './planning-values.js';
 
 /** What the study asks: the outcome with its target difference, and the test. The rest comes from the ledger. */
@@ -19,10 +27,20 @@ export const questionOutcomeSchema = z.discriminatedUnion('kind', [
   }),
 ]);
 
+const power = openProportion('The power');
+
+/** What is kept equal while options are compared; `power` is asked of every option under each hold. */
 export const holdSchema = z.discriminatedUnion('kind', [
-  z.strictObject({ kind: z.literal('power'), power: z.number().gt(0).lt(1) }),
-  z.strictObject({ kind: z.literal('sizes'), power: z.number().gt(0).lt(1) }),
+  z.strictObject({ kind: z.literal('power'), power }),
+  z.strictObject({ kind: z.literal('budget'), power, budget: positive('The budget') }),
+  z.strictObject({ kind: z.literal('sizes'), power }),
 ]);
+
+/** Whether an option may be chosen at all, and why. */
+export const rulingSchema = z.strictObject({
+  kind: z.enum(['admissible', 'conditions', 'not-admissible']),
+  reason: z.string().trim().min(1, 'Give the reason of the ruling.').max(2000),
+});
 
 const overrideSchema = z.strictObject({ value: z.number(), reason: z.string().min(1) });
 
@@ -58,6 +76,7 @@ export const studyCostsSchema = z.strictObject({ costs: costPlanSchema, timeline
 
 export type QuestionOutcome = z.infer<typeof questionOutcomeSchema>;
 export type Hold = z.infer<typeof holdSchema>;
+export type Ruling = z.infer<typeof rulingSchema>;
 export type OptionPlan = z.infer<typeof optionPlanSchema>;
 export type LedgerEntry = z.infer<typeof ledgerEntrySchema>;
 export type StudyCosts = z.infer<typeof studyCostsSchema>;

@@ -1,11 +1,8 @@
 import type { Feasible } from '../appraisal.js';
+import type { LimitKey, Use } from './limits.js';
 import type { Hold } from './study-plan.js';
 import type { WeighedOption } from './weigh.js';
-
-export interface Noun {
-  one: string;
-  many: string;
-}
+import { count, list, money, months, type Noun, noun, percent, sentences } from './wording.js';
 
 export interface VerdictWords {
   hold: Hold;
@@ -19,128 +16,159 @@ export interface Verdict {
   detail: string;
 }
 
-interface Standing {
-  option: WeighedOption;
-  appraisal: Feasible;
-}
+type Sized = WeighedOption & { appraisal: Feasible };
 
-/** Which option comes out ahead and by how much, in one headline and one sentence. */
+/**
+ * Which option comes out ahead, and why not the others: by the limits where there are any, by cost, time and number
+ * where there are none. Options ruled out are named last and never win.
+ */
 export function verdict(weighed: readonly WeighedOption[], words: VerdictWords): Verdict {
   if (weighed.length === 0) {
     return { headline: 'No options yet.', detail: 'Add a candidate design to weigh it.' };
   }
-  const standing = weighed.flatMap((option) =>
-    option.appraisal?.feasible ? [{ option, appraisal: option.appraisal }] : [],
-  );
-  const [only] = standing;
-  const absent = missingSentence(weighed);
-  if (!only) return { headline: 'No option can be sized as it stands.', detail: absent };
-  if (standing.length === 1) return { headline: aloneHeadline(only, words), detail: absent };
-  return compare(standing, words, absent);
-}
-
-function aloneHeadline({ option, appraisal }: Standing, words: VerdictWords): string {
-  const size = `${count(appraisal.recruited)} ${noun(words.participants, appraisal.recruited)}`;
-  const facts = [size, ...cost(appraisal, words), ...time(appraisal)];
-  return `${option.letter} takes ${list(facts)}.`;
-}
-
-function compare(standing: readonly Standing[], words: VerdictWords, absent: string): Verdict {
-  const measures: { words: string; of: (appraisal: Feasible) => number | undefined }[] = [
-    { words: 'costs least', of: ({ costs }) => costs?.total },
-    { words: 'ends first', of: ({ timeline }) => timeline?.months },
-    { words: `recruits the fewest ${words.participants.many}`, of: ({ recruited }) => recruited },
+  const admitted = weighed.filter(({ ruling }) => ruling?.kind !== 'not-admissible');
+  const ruledOut = weighed
+    .filter(({ ruling }) => ruling?.kind === 'not-admissible')
+    .map(({ letter }) => letter);
+  const sized = admitted.filter((option): option is Sized => option.appraisal?.feasible === true);
+  const rest = [
+    ...admitted.filter((option) => !option.appraisal?.feasible).map(whyNotSized),
+    ruledOut.length > 0 ? `${list(ruledOut)} ${ruledOut.length === 1 ? 'is' : 'are'} ruled out` : '',
   ];
-  const wins = measures.flatMap(({ words: what, of }) => {
-    const leader = strictlyLeast(standing, of);
-    return leader ? [{ leader, what }] : [];
-  });
-  const [ahead] = wins;
-  if (!ahead) return { headline: 'The options come out level.', detail: absent };
-  const leader = ahead.leader;
-  const won = wins.filter((win) => win.leader === leader).map((win) => win.what);
-  const others = wins
-    .filter((win) => win.leader !== leader)
-    .map((win) => `${win.leader.option.letter} ${win.what}`);
-  const behind = standing
-    .filter((each) => each !== leader)
-    .map((each) => `${each.option.letter} takes ${difference(each.appraisal, leader.appraisal, words)}`);
-  const held =
-    words.hold.kind === 'power' ? `At power ${percent(words.hold.power)} ` : 'At the sizes entered ';
+  if (sized.length === 0) {
+    const headline =
+      admitted.length === 0 ? 'Every option is ruled out.' : 'No option can be sized as it stands.';
+    return { headline, detail: sentences(rest) };
+  }
+  const fitting = sized.filter(({ standing }) => standing?.fits ?? true);
+  const failing = sized.filter((option) => !fitting.includes(option));
+  const limited = failing.length > 0 || sized.some(({ standing }) => standing && standing.uses.length > 0);
+  const ahead = fitting.length > 1 ? leaderOf(fitting, words) : null;
   return {
-    headline: `${held}${leader.option.letter} ${list(won)}.`,
-    detail: sentences([list(others), behind.join('; '), absent]),
+    headline: limited ? limitHeadline(fitting, sized, ahead) : openHeadline(sized, ahead, words),
+    detail: sentences([
+      ...(ahead?.others ?? []),
+      ahead && !limited ? behind(ahead.leader, fitting, words) : '',
+      ...failing.map((option) => whyNotFitting(option, words)),
+      ...rest,
+    ]),
   };
 }
 
-function difference(appraisal: Feasible, against: Feasible, words: VerdictWords): string {
+function limitHeadline(fitting: readonly Sized[], sized: readonly Sized[], ahead: Leader | null): string {
+  const [only] = fitting;
+  if (!only) return sized.length === 1 ? `${sized[0]?.letter} does not fit.` : 'No option fits every limit.';
+  if (fitting.length === 1) {
+    return sized.length === 1 ? `${only.letter} fits every limit.` : `Only ${only.letter} fits every limit.`;
+  }
+  const who =
+    fitting.length === sized.length
+      ? 'Every option fits'
+      : `${list(fitting.map(({ letter }) => letter))} fit every limit`;
+  return ahead ? `${who}; ${ahead.leader.letter} ${list(ahead.won)}.` : `${who}.`;
+}
+
+function openHeadline(sized: readonly Sized[], ahead: Leader | null, words: VerdictWords): string {
+  const [first] = sized;
+  if (first && sized.length === 1) {
+    const { recruited, costs, timeline } = first.appraisal;
+    const facts = [
+      `${count(recruited)} ${noun(words.participants, recruited)}`,
+      costs ? money(costs.total, words.currency) : '',
+      timeline ? months(timeline.months) : '',
+    ];
+    return `${first.letter} takes ${list(facts)}.`;
+  }
+  if (!ahead) return 'The options come out level.';
+  const held = {
+    power: `At power ${percent(words.hold.power)}`,
+    budget: 'Within the budget',
+    sizes: 'At the sizes entered',
+  };
+  return `${held[words.hold.kind]} ${ahead.leader.letter} ${list(ahead.won)}.`;
+}
+
+interface Leader {
+  leader: Sized;
+  won: string[];
+  /** What others lead on, as in “B ends first”. */
+  others: string[];
+}
+
+function leaderOf(options: readonly Sized[], { participants }: VerdictWords): Leader | null {
+  const measures: [string, (appraisal: Feasible) => number | undefined][] = [
+    ['costs least', ({ costs }) => costs?.total],
+    ['ends first', ({ timeline }) => timeline?.months],
+    [`recruits the fewest ${participants.many}`, ({ recruited }) => recruited],
+  ];
+  const wins = measures.flatMap(([what, of]) => {
+    const leader = strictlyLeast(options, of);
+    return leader ? [{ leader, what }] : [];
+  });
+  const leader = wins[0]?.leader;
+  if (!leader) return null;
+  return {
+    leader,
+    won: wins.filter((win) => win.leader === leader).map((win) => win.what),
+    others: wins.filter((win) => win.leader !== leader).map((win) => `${win.leader.letter} ${win.what}`),
+  };
+}
+
+function behind(leader: Sized, options: readonly Sized[], words: VerdictWords): string {
+  return options
+    .filter((option) => option !== leader)
+    .map(({ letter, appraisal }) => `${letter} takes ${difference(appraisal, leader.appraisal, words)}`)
+    .join('; ');
+}
+
+/** How much more or less one option takes than another, in words: participants, money, months. */
+export function difference(appraisal: Feasible, against: Feasible, words: VerdictWords): string {
   const parts: string[] = [];
   const more = appraisal.recruited - against.recruited;
+  const many = Math.abs(more);
   if (more !== 0)
-    parts.push(
-      `${count(Math.abs(more))} ${more > 0 ? 'more' : 'fewer'} ${noun(words.participants, Math.abs(more))}`,
-    );
+    parts.push(`${count(many)} ${more > 0 ? 'more' : 'fewer'} ${noun(words.participants, many)}`);
   if (appraisal.costs && against.costs) {
     const extra = appraisal.costs.total - against.costs.total;
-    parts.push(`${money(Math.abs(extra), words.currency)} ${extra >= 0 ? 'more' : 'less'}`);
+    if (Math.abs(extra) >= 0.5)
+      parts.push(`${money(Math.abs(extra), words.currency)} ${extra > 0 ? 'more' : 'less'}`);
   }
   if (appraisal.timeline && against.timeline) {
     const later = Math.round(appraisal.timeline.months) - Math.round(against.timeline.months);
-    if (later !== 0)
-      parts.push(
-        `${Math.abs(later)} ${Math.abs(later) === 1 ? 'month' : 'months'} ${later > 0 ? 'longer' : 'less'}`,
-      );
+    if (later !== 0) parts.push(`${months(Math.abs(later))} ${later > 0 ? 'longer' : 'less'}`);
   }
   return parts.length === 0 ? 'the same' : list(parts);
 }
 
+function whyNotSized({ letter, appraisal, error }: WeighedOption): string {
+  const why = error?.message ?? (appraisal?.feasible === false ? appraisal.infeasible.message : '');
+  return `${letter} cannot be ${error ? 'computed' : 'sized'}: ${why.replace(/\.$/, '')}`;
+}
+
+function whyNotFitting({ letter, appraisal, standing }: Sized, words: VerdictWords): string {
+  const breaches = standing?.breaches ?? [];
+  const reasons = breaches.map((use) => breachWords[use.limit](use, words));
+  if (standing && !standing.reachesPower) {
+    reasons.unshift(`reaches ${percent(appraisal.power)} of the ${percent(words.hold.power)} asked for`);
+  }
+  return `${letter} ${list(reasons)}`;
+}
+
+const breachWords: Record<LimitKey, (use: Use, words: VerdictWords) => string> = {
+  clusters: ({ over }, { clusters }) =>
+    `needs ${count(over)} ${clusters ? noun(clusters, over) : 'clusters'} that do not exist`,
+  participantsPerCluster: ({ over }, { participants, clusters }) =>
+    `needs ${count(over)} ${noun(participants, over)} more in each ${clusters?.one ?? 'cluster'} than there are`,
+  money: ({ over }, { currency }) => `costs ${money(over, currency)} too much`,
+  months: ({ over }) => (over < 0.5 ? 'ends less than a month late' : `ends ${months(over)} late`),
+};
+
 function strictlyLeast(
-  standing: readonly Standing[],
+  options: readonly Sized[],
   of: (appraisal: Feasible) => number | undefined,
-): Standing | undefined {
-  const values = standing.map((each) => of(each.appraisal));
+): Sized | undefined {
+  const values = options.map(({ appraisal }) => of(appraisal));
   if (values.some((value) => value === undefined)) return undefined;
   const least = Math.min(...(values as number[]));
-  return values.filter((value) => value === least).length === 1 ? standing[values.indexOf(least)] : undefined;
-}
-
-function missingSentence(weighed: readonly WeighedOption[]): string {
-  return sentences(
-    weighed.map(({ letter, appraisal, error }) => {
-      if (error) return `${letter} cannot be computed: ${withoutStop(error.message)}`;
-      if (appraisal && !appraisal.feasible)
-        return `${letter} cannot reach the power: ${withoutStop(appraisal.infeasible.message)}`;
-      return '';
-    }),
-  );
-}
-
-const withoutStop = (message: string) => message.replace(/\.$/, '');
-const noun = ({ one, many }: Noun, n: number) => (n === 1 ? one : many);
-const count = (n: number) => Math.round(n).toLocaleString('en-GB');
-const percent = (proportion: number) => `${Number((100 * proportion).toPrecision(4))}\u202f%`;
-const cost = ({ costs }: Feasible, { currency }: VerdictWords) =>
-  costs ? [money(costs.total, currency)] : [];
-const time = ({ timeline }: Feasible) => (timeline ? [`${Math.round(timeline.months)} months`] : []);
-
-/** Thousands of the currency, as in 19 k€; whole units below ten thousand. */
-export function money(amount: number, currency: string): string {
-  const sign = symbols[currency] ?? currency;
-  const thousands = Math.abs(amount) >= 10_000;
-  const figure = Math.round(thousands ? amount / 1000 : amount).toLocaleString('en-GB');
-  return thousands ? `${figure}\u202fk${sign}` : `${figure}\u202f${sign}`;
-}
-
-const symbols: Record<string, string> = { EUR: '€', GBP: '£', USD: '$' };
-
-function list(parts: readonly string[]): string {
-  const kept = parts.filter((part) => part !== '');
-  return kept.length < 2 ? (kept[0] ?? '') : `${kept.slice(0, -1).join(', ')} and ${kept.at(-1)}`;
-}
-
-function sentences(parts: readonly string[]): string {
-  return parts
-    .filter((part) => part !== '')
-    .map((part) => `${part}.`)
-    .join(' ');
+  return values.filter((value) => value === least).length === 1 ? options[values.indexOf(least)] : undefined;
 }

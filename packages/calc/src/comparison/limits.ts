@@ -1,0 +1,45 @@
+import { z } from 'zod';
+import type { Feasible } from '../appraisal.js';
+import { recruitedFor } from '../designs/allocation.js';
+import type { AppraisalRequest } from '../parse-request.js';
+import { quantity, wholeNumber } from '../request.js';
+
+export const limitKeys = ['clusters', 'participantsPerCluster', 'money', 'months'] as const;
+export type LimitKey = (typeof limitKeys)[number];
+
+/** The most clusters, participants per cluster (and period), money and months that exist. */
+export const limitsSchema = z.strictObject({
+  clusters: wholeNumber('The number of clusters', 1).optional(),
+  participantsPerCluster: wholeNumber('The participants per cluster', 1).optional(),
+  money: quantity('The money', 0).optional(),
+  months: quantity('The months', 0, 1200).optional(),
+});
+export type Limits = z.infer<typeof limitsSchema>;
+
+/** What an option takes of one limit: `over` is above 0 where it breaks it, below where it has some to spare. */
+export interface Use {
+  limit: LimitKey;
+  allowed: number;
+  taken: number;
+  over: number;
+}
+
+/** Every limit that concerns the option, in the order in which a breach binds. */
+export function usesOf(limits: Limits, request: AppraisalRequest, appraisal: Feasible): Use[] {
+  const taken: Record<LimitKey, number | undefined> = {
+    clusters: appraisal.recruitedClusters,
+    participantsPerCluster:
+      appraisal.clusterSize && recruitedFor(appraisal.clusterSize, request.attrition?.participants),
+    money: appraisal.costs?.total,
+    months: appraisal.timeline?.months,
+  };
+  return limitKeys.flatMap((limit) => {
+    const [allowed, used] = [limits[limit], taken[limit]];
+    return allowed === undefined || used === undefined
+      ? []
+      : [{ limit, allowed, taken: used, over: used - allowed }];
+  });
+}
+
+/** Money and months are real: a breach smaller than rounding is none. */
+export const breaks = ({ over, allowed }: Use): boolean => over > 1e-9 * Math.max(1, allowed);
