@@ -22,6 +22,8 @@ export interface Bound {
     clusterSize?: number,
     outcomes?: readonly OutcomeModel[],
   ): Evaluated;
+  /** What the statistic of each comparison must exceed. */
+  criticalValue(df: number | null): number;
   /** The |δ|/SE at which a comparison reaches `power`. */
   noncentralityNeeded(contrast: Contrast, df: number | null, power: number): number;
 }
@@ -50,6 +52,7 @@ export function bind(request: AppraisalRequest): Bound {
     ? alphaPerComparison(comparisons, request.test.alpha, active)
     : request.test.alpha;
   const tailAlpha = alpha / request.test.sides;
+  const criticalValueAt = (df: number | null) => criticalValue(tailAlpha, df);
   const normalReference = request.test.reference === 'normal';
   const analyse: Bound['analyse'] = (groupUnits, clusterSize, modelled = outcomes) => {
     const analysis = plan.analyse(groupUnits, modelled, clusterSize);
@@ -62,14 +65,15 @@ export function bind(request: AppraisalRequest): Bound {
     outcomes,
     alphaPerComparison: alpha,
     analyse,
+    criticalValue: criticalValueAt,
     evaluate(groupUnits, clusterSize, modelled) {
       const analysis = analyse(groupUnits, clusterSize, modelled);
-      const critical = criticalValue(tailAlpha, analysis.df);
+      const critical = criticalValueAt(analysis.df);
       const powers = analysis.contrasts.map((contrast) => superiorityPower(contrast, critical, analysis.df));
       return { analysis, criticalValue: critical, powers, power: Math.min(...powers) };
     },
     noncentralityNeeded: (contrast, df, power) =>
-      noncentralityNeeded(contrast, criticalValue(tailAlpha, df), df, power),
+      noncentralityNeeded(contrast, criticalValueAt(df), df, power),
   };
 }
 

@@ -76,23 +76,25 @@ function solveSize(bound: Bound, power: number): Solution | Shortfall {
 }
 
 /**
- * Units from |δ|/SE growing with their square root, refined once where the df matters; the real-valued solution
- * of two equal arms refines them by itself.
+ * Units from |δ|/SE growing with their square root under the normal distribution, and z²/(2 df) of them more
+ * where there is a df: close enough that the search begins within a unit or so of its end.
+ *
+ * Source: Guenther 1981, Am Stat 35:243, for the correction.
  */
 function guessUnits(bound: Bound, power: number): number {
   const { plan } = bound;
-  const scaled = (units: number, assumeNormal: boolean) => {
-    const analysis = bound.analyse(plan.groupUnits(units));
-    const df = assumeNormal ? null : analysis.df;
-    const ratios = analysis.contrasts.map(
+  const start = Math.max(plan.minimumUnits, 100);
+  const shares = bound
+    .analyse(plan.groupUnits(start))
+    .contrasts.map(
       (contrast) =>
-        (bound.noncentralityNeeded(contrast, df, power) * contrast.standardError) / Math.abs(contrast.effect),
+        (bound.noncentralityNeeded(contrast, null, power) * contrast.standardError) /
+        Math.abs(contrast.effect),
     );
-    return units * Math.max(...ratios) ** 2;
-  };
-  const first = scaled(Math.max(plan.minimumUnits, 100), true);
-  if (first > largestCount || !plan.hasDf || plan.equalPair) return first;
-  return scaled(Math.max(plan.minimumUnits, Math.ceil(first)), false);
+  const units = start * Math.max(...shares) ** 2;
+  if (!(units < largestCount)) return units;
+  const { df } = bound.analyse(plan.groupUnits(Math.max(plan.minimumUnits, Math.ceil(units))));
+  return df === null ? units : units * (1 + bound.criticalValue(null) ** 2 / (2 * df));
 }
 
 /**
