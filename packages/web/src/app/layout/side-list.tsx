@@ -1,0 +1,80 @@
+import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
+import { Link } from 'react-router-dom';
+import { OptionTag } from '../../shared/ui/option-tag';
+import { ownTokens } from '../../shared/ui/own-tokens';
+import { useStudyPages } from './study-pages';
+
+const useStyles = makeStyles({
+  list: {
+    position: 'sticky',
+    top: '48px',
+    alignSelf: 'start',
+    padding: '18px 10px',
+    '@media (max-width: 900px)': { display: 'none' },
+    '@media print': { display: 'none' },
+  },
+  item: {
+    display: 'flex',
+    alignItems: 'center',
+    gap: '9px',
+    padding: '7px 10px',
+    borderRadius: '6px',
+    color: tokens.colorNeutralForeground1,
+    textDecorationLine: 'none',
+    lineHeight: '18px',
+    overflowWrap: 'anywhere',
+    ':hover': { backgroundColor: tokens.colorNeutralBackground1 },
+    ':focus-visible': { outline: `2px solid ${tokens.colorStrokeFocus2}`, outlineOffset: '-2px' },
+  },
+  here: {
+    backgroundColor: ownTokens.brassSoft,
+    boxShadow: `inset 3px 0 ${tokens.colorBrandForeground1}`,
+    fontWeight: 700,
+    ':hover': { backgroundColor: ownTokens.brassSoft },
+  },
+  heading: {
+    padding: '12px 10px 4px',
+    color: tokens.colorNeutralForeground2,
+    fontSize: '13px',
+    lineHeight: '18px',
+  },
+});
+
+export function SideList({ studyId }: { studyId: string }) {
+  const styles = useStyles();
+  const pages = useStudyPages(studyId);
+  return (
+    <nav aria-label="Study" className={styles.list}>
+      {pages && (
+        <>
+          <Link
+            to={pages.weigh.path}
+            aria-current={pages.weigh.current ? 'page' : undefined}
+            className={mergeClasses(styles.item, pages.weigh.current && styles.here)}
+          >
+            Weigh
+          </Link>
+          {pages.workings.length > 0 && (
+            <p id="workings" className={styles.heading}>
+              Working
+            </p>
+          )}
+          <ul aria-labelledby="workings">
+            {pages.workings.map(({ id, letter, position, name, path, current }) => (
+              <li key={id}>
+                <Link
+                  to={path}
+                  aria-current={current ? 'page' : undefined}
+                  className={mergeClasses(styles.item, current && styles.here)}
+                >
+                  <OptionTag letter={letter} position={position} small />
+                  <span>{name}</span>
+                </Link>
+              </li>
+            ))}
+          </ul>
+        </>
+      )}
+    </nav>
+  );
+}

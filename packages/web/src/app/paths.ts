@@ -1,0 +1,22 @@
+export const paths = {
+  studies: '/',
+  signIn: '/sign-in',
+  welcome: (code: string) => `/welcome/${encodeURIComponent(code)}`,
+  weigh: (studyId: string, optionId?: string) =>
+    `/studies/${studyId}/weigh${optionId ? `?option=${optionId}` : ''}`,
+  working: (studyId: string, optionId: string) => `/studies/${studyId}/options/${optionId}`,
+};
+
+/** Signing in, and back to where one came from. */
+export function signInPath({ pathname, search }: { pathname: string; search: string }): string {
+  const from = `${pathname}${search}`;
+  return from === paths.studies ? paths.signIn : `${paths.signIn}?${new URLSearchParams({ from })}`;
+}
+
+/** The page to return to after signing in: one of ours, or the studies. */
+export function returnPath(from: string | null): string {
+  if (from === null) return paths.studies;
+  const url = new URL(from, location.origin);
+  const ours = url.origin === location.origin && url.pathname !== paths.signIn;
+  return ours ? `${url.pathname}${url.search}` : paths.studies;
+}

@@ -1,0 +1,70 @@
+import type { PlanningValueView } from '@steelyard/api/contract/studies';
+import { families, type PlanningValueKey, planningValuesOf, planningValueTraits } from '@steelyard/calc';
+import { figure, percent, withUnit } from '../../../shared/format/numbers';
+import type { Weighed } from './weighing';
+
+/** A planning value that an option's figures rest on, in words and units. */
+export interface Assumption {
+  key: PlanningValueKey;
+  label: string;
+  /** What the option is computed with. */
+  used: string;
+  /** The ledger's line: its value, range, source and author; undefined where only an override speaks. */
+  ledger:
+    | { value: string; range: string | undefined; source: string; setBy: string; setAt: string }
+    | undefined;
+  /** Why the option takes a value of its own. */
+  reason: string | undefined;
+}
+
+/** The planning values that reach an option's request, in its family's order. */
+export function assumptionsOf({ family, plan, request }: Weighed, ledger: PlanningValueView[], unit: string) {
+  return planningValuesOf(family).flatMap(({ path, key }): Assumption[] => {
+    const used = numberAt(request, path);
+    if (used === undefined) return [];
+    const show = (value: number) => shown(key, value, unit);
+    const line =
+      ledger.find((each) => each.key === key && each.family === family) ??
+      ledger.find((each) => each.key === key && each.family === null);
+    return [
+      {
+        key,
+        label: labelOf(key, line),
+        used: show(used),
+        ledger: line && {
+          value: show(line.value),
+          range: rangeOf(line, show),
+          source: line.source,
+          setBy: line.setBy,
+          setAt: line.setAt,
+        },
+        reason: plan.overrides[key]?.reason,
+      },
+    ];
+  });
+}
+
+function labelOf(key: PlanningValueKey, line: PlanningValueView | undefined): string {
+  const { label } = planningValueTraits[key];
+  return line?.family ? `${label}, ${families[line.family].name.toLocaleLowerCase('en-GB')}` : label;
+}
+
+function rangeOf({ low, high }: PlanningValueView, show: (value: number) => string): string | undefined {
+  if (low !== null && high !== null) return `${show(low)} to ${show(high)}`;
+  if (low !== null) return `${show(low)} or more`;
+  return high === null ? undefined : `${show(high)} or less`;
+}
+
+function shown(key: PlanningValueKey, value: number, outcomeUnit: string): string {
+  const { unit } = planningValueTraits[key];
+  if (unit === 'proportion') return percent(value, 2);
+  return withUnit(figure(value), unit === 'outcome' ? outcomeUnit : '');
+}
+
+/** The number at a path such as `outcome.repeated.correlation`, where there is one. */
+function numberAt(request: unknown, path: string): number | undefined {
+  const value = path
+    .split('.')
+    .reduce<unknown>((part, key) => (part as Record<string, unknown> | undefined)?.[key], request);
+  return typeof value === 'number' ? value : undefined;
+}

@@ -1,0 +1,80 @@
+import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
+import type { Step } from '@steelyard/calc';
+import { figure } from '../../../shared/format/numbers';
+import { ScrollRegion } from '../../../shared/ui/scroll-region';
+import { Maths } from './maths';
+
+const stacked = '@media (max-width: 900px)';
+
+const useStyles = makeStyles({
+  card: {
+    border: `1px solid ${tokens.colorNeutralStroke2}`,
+    borderRadius: '10px',
+    backgroundColor: tokens.colorNeutralBackground1,
+  },
+  table: { width: '100%', [stacked]: { display: 'block' } },
+  heads: { [stacked]: { display: 'none' } },
+  head: {
+    padding: '6px 16px',
+    color: tokens.colorNeutralForeground2,
+    fontSize: '13px',
+    lineHeight: '20px',
+  },
+  step: {
+    borderTop: `1px solid ${tokens.colorNeutralStroke2}`,
+    breakInside: 'avoid',
+    [stacked]: { display: 'grid', rowGap: '4px', padding: '10px 14px' },
+  },
+  cell: { padding: '9px 16px', [stacked]: { padding: 0 } },
+  label: { width: '30%', minWidth: '210px', [stacked]: { width: 'auto', maxWidth: 'calc(100vw - 60px)' } },
+  name: { display: 'block', fontWeight: 700, lineHeight: '18px' },
+  source: {
+    display: 'block',
+    color: tokens.colorNeutralForeground2,
+    fontSize: '13px',
+    lineHeight: '17px',
+  },
+  value: {
+    fontSize: '16px',
+    fontWeight: 700,
+    textAlign: 'end',
+    whiteSpace: 'nowrap',
+    [stacked]: { textAlign: 'start', '::before': { content: '"= "' } },
+  },
+  end: { textAlign: 'end' },
+});
+
+/** The arithmetic as a statistician would write it down: formula, figures put in, value, source. */
+export function Steps({ steps }: { steps: readonly Step[] }) {
+  const styles = useStyles();
+  return (
+    <ScrollRegion label="Steps, scrolls sideways" className={styles.card}>
+      <table className={styles.table} aria-label="Working, step by step">
+        <thead className={styles.heads}>
+          <tr>
+            <th className={styles.head}>Step and source</th>
+            <th className={styles.head}>Formula</th>
+            <th className={styles.head}>With the figures</th>
+            <th className={mergeClasses(styles.head, styles.end)}>Value</th>
+          </tr>
+        </thead>
+        <tbody>
+          {steps.map(({ label, formula, substituted, value, source }) => (
+            <tr key={label} className={styles.step}>
+              <th scope="row" className={mergeClasses(styles.cell, styles.label)}>
+                <span className={styles.name}>{label}</span> <span className={styles.source}>{source}</span>
+              </th>
+              <td className={styles.cell}>
+                <Maths tex={formula} />
+              </td>
+              <td className={styles.cell}>
+                <Maths tex={substituted} />
+              </td>
+              <td className={mergeClasses(styles.cell, styles.value)}>{figure(value)}</td>
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </ScrollRegion>
+  );
+}

@@ -1,0 +1,100 @@
+import { makeStyles, tokens } from '@fluentui/react-components';
+import { type AppraisalRequest, explain } from '@steelyard/calc';
+import { OptionTag } from '../../../shared/ui/option-tag';
+import { optionHue } from '../../../shared/ui/own-tokens';
+import { TextLink } from '../../../shared/ui/text-link';
+import { TitledSection } from '../../../shared/ui/titled-section';
+import { Word } from '../../../shared/ui/words';
+import { familyUiOf } from '../../designs/families/registry';
+import { Cautions } from '../../weigh/components/cautions';
+import { OutOfReach } from '../../weigh/components/out-of-reach';
+import { assumptionsOf } from '../../weigh/model/assumptions';
+import type { Weighed, Weighing } from '../../weigh/model/weighing';
+import { AssumptionsTable } from './assumptions-table';
+import { RequestJson } from './request-json';
+import { ScheduleTable } from './schedule-table';
+import { Steps } from './steps';
+
+const useStyles = makeStyles({
+  page: {
+    display: 'grid',
+    gridTemplateColumns: 'minmax(0, 1fr)',
+    gap: '20px',
+    maxWidth: '1120px',
+    padding: '16px 18px 40px',
+    '@media (max-width: 640px)': { padding: '12px' },
+  },
+  heading: { display: 'flex', gap: '12px', alignItems: 'flex-start' },
+  name: {
+    minWidth: 0,
+    fontSize: '19px',
+    lineHeight: '26px',
+    fontWeight: 700,
+    overflowWrap: 'anywhere',
+  },
+  sub: { color: tokens.colorNeutralForeground2, fontSize: '13px', lineHeight: '20px' },
+  trouble: {
+    marginTop: '10px',
+    padding: '10px 14px',
+    borderRadius: '8px',
+    border: `1px solid ${tokens.colorNeutralStroke2}`,
+    backgroundColor: tokens.colorNeutralBackground1,
+  },
+});
+
+interface WorkingProps {
+  option: Weighed;
+  weighing: Weighing;
+  weighHref: string;
+}
+
+/** How one option's figures come about, step by step, and what they rest on. */
+export function Working({ option, weighing, weighHref }: WorkingProps) {
+  const styles = useStyles();
+  const { family, plan, words, appraisal, error, request, letter, position, name } = option;
+  const { study, ledger } = weighing;
+  const face = familyUiOf(family);
+  const size = appraisal?.feasible ? appraisal : null;
+  return (
+    <div className={styles.page}>
+      <div>
+        <div className={styles.heading}>
+          <OptionTag letter={letter} position={position} />
+          <h1 className={styles.name}>{name}: the working</h1>
+        </div>
+        <p className={styles.sub}>
+          {face.summary(plan, size, words)} · <TextLink to={weighHref}>beside the other options</TextLink>
+        </p>
+        {!size && (
+          <div className={styles.trouble}>
+            <OutOfReach option={option} />
+          </div>
+        )}
+      </div>
+      <TitledSection level={2} title="Schedule">
+        <ScheduleTable schematic={face.schematic(plan, words)} arms={words.arms} hue={optionHue(position)} />
+      </TitledSection>
+      {request && !error && (
+        <TitledSection level={2} title="Step by step">
+          <Steps steps={explain(request as AppraisalRequest)} />
+        </TitledSection>
+      )}
+      <TitledSection
+        level={2}
+        title={
+          <>
+            <Word is="planningValue">Planning values</Word> it rests on
+          </>
+        }
+      >
+        <AssumptionsTable assumptions={assumptionsOf(option, ledger, study.outcomeUnit)} />
+      </TitledSection>
+      {appraisal && (
+        <TitledSection level={2} title="Cautions">
+          <Cautions cautions={appraisal.cautions} />
+        </TitledSection>
+      )}
+      {request && <RequestJson request={request} />}
+    </div>
+  );
+}

@@ -1,0 +1,49 @@
+import { makeStyles, mergeClasses, Tooltip, type TooltipProps, tokens } from '@fluentui/react-components';
+import { type ReactNode, useState } from 'react';
+
+const useStyles = makeStyles({
+  trigger: {
+    appearance: 'none',
+    display: 'inline',
+    padding: 0,
+    border: 'none',
+    background: 'none',
+    font: 'inherit',
+    color: 'inherit',
+    textAlign: 'inherit',
+    cursor: 'help',
+    borderRadius: tokens.borderRadiusSmall,
+    ':focus-visible': { outline: `2px solid ${tokens.colorStrokeFocus2}`, outlineOffset: '2px' },
+  },
+});
+
+interface HintProps {
+  says: string;
+  /** Whether what it says names the trigger or adds to its text. */
+  relationship?: TooltipProps['relationship'];
+  className?: string;
+  children: ReactNode;
+}
+
+/** Something that says more when it is pointed at, focused or pressed. */
+export function Hint({ says, relationship = 'description', className, children }: HintProps) {
+  const styles = useStyles();
+  const [visible, setVisible] = useState(false);
+  return (
+    <Tooltip
+      content={says}
+      relationship={relationship}
+      withArrow
+      visible={visible}
+      onVisibleChange={(_, data) => setVisible(data.visible)}
+    >
+      <button
+        type="button"
+        className={mergeClasses(styles.trigger, className)}
+        onClick={() => setVisible(true)}
+      >
+        {children}
+      </button>
+    </Tooltip>
+  );
+}

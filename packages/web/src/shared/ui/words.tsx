@@ -1,0 +1,51 @@
+import { makeStyles, tokens } from '@fluentui/react-components';
+import type { ReactNode } from 'react';
+import { Hint } from './hint';
+
+/** What our own words mean; trade terms stay as they are. */
+const meanings = {
+  study: 'One research question with its target difference, and everything assumed to answer it.',
+  option: 'One candidate design: its structure, its size, and any planning value it takes differently.',
+  hold: 'What is kept equal while options are compared.',
+  holdPower: 'Each option takes the fewest units that reach this power.',
+  holdSizes: 'Each option keeps the size entered for it; what differs is the power it reaches.',
+  beam: 'One option’s cost as a bar, split by arm: control outlined, active filled, all on one scale.',
+  verdict: 'What the comparison comes to at the hold, worked out afresh from the figures below.',
+  ledger: 'The list of what this study assumes: each value with its range and where it comes from.',
+  planningValue: 'One assumption: a value with its range, its source, who set it and when.',
+  override: 'This option takes a value of its own in place of the ledger’s, for the reason given.',
+} as const;
+
+const useStyles = makeStyles({
+  word: {
+    textDecorationLine: 'underline',
+    textDecorationStyle: 'dotted',
+    textDecorationThickness: '1px',
+    textUnderlineOffset: '3px',
+  },
+  chip: {
+    padding: '1px 10px',
+    border: `1px solid ${tokens.colorNeutralStroke1}`,
+    borderRadius: '999px',
+    backgroundColor: tokens.colorNeutralBackground1,
+    color: tokens.colorNeutralForeground1,
+    fontSize: '13px',
+    lineHeight: '22px',
+  },
+});
+
+interface WordProps {
+  is: keyof typeof meanings;
+  chip?: boolean;
+  children: ReactNode;
+}
+
+/** One of our own words, which shows what it means. */
+export function Word({ is, chip, children }: WordProps) {
+  const styles = useStyles();
+  return (
+    <Hint says={meanings[is]} className={chip ? styles.chip : styles.word}>
+      {children}
+    </Hint>
+  );
+}
