@@ -2,20 +2,17 @@
 
     /usr/bin/python3 chi_squared.py
 """
-from exact import exp, gamma_tails, log, mpf, root, write
+from exact import exp, gamma_tails, log, log_quantile, mpf, write
 
 DEGREES = [0.1, 0.3, 1, 1.5, 2, 3, 5, 9, 19.9, 20.1, 29, 50, 99, 314.2, 1e3, 2e4, 1e5, 1e7, 1e9, 1e12]
 TAILS = [0.499, 0.4, 0.2, 0.1, 0.05, 0.025, 0.005, 1e-3, 1e-5, 1e-9, 1e-14, 1e-20, 1e-60, 1e-150, 1e-300]
 
 
 def quantile(p, df, side):
-    """On log x, within forty standard deviations and the reach of the first term."""
-    a = mpf(df) / 2
-    tail = lambda u: log(gamma_tails(a, exp(u))[side])
-    sign = 1 if side == 0 else -1
-    high = log(a + 40 * a**0.5 + 800)
-    low = log(a) - 40 / a**0.5 if a > 5000 else log(mpf(1) / 1000) - 720 / a
-    return 2 * exp(root(lambda u: sign * (tail(u) - log(mpf(p))), low, high))
+    """On log x, turned round for the upper side."""
+    a, sign = mpf(df) / 2, 1 if side == 0 else -1
+    tail = lambda u: gamma_tails(a, exp(sign * u))[side]
+    return 2 * exp(sign * log_quantile(tail, p, sign * log(a), 1 / a**0.5))
 
 
 quantiles = []

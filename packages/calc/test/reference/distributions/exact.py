@@ -131,6 +131,20 @@ def root(f, low, high):
     raise ArithmeticError("no root")
 
 
+def log_quantile(lower, p, start, step):
+    """The u below which lies p, where lower(u) is the tail: widening from a start in the middle by doubled steps."""
+
+    def excess(u):
+        return log(max(lower(u), mpf(10) ** -390)) - log(mpf(p))
+
+    low = high = start
+    while excess(low) > 0:
+        low, step = low - step, 2 * step
+    while excess(high) < 0:
+        high, step = high + step, 2 * step
+    return root(excess, low, high)
+
+
 def write(name, columns, rows):
     """One row a line, each figure the double nearest to the exact value."""
     lines = ",\n".join(json.dumps([float(value) for value in row]) for row in rows)

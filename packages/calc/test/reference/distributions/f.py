@@ -3,7 +3,7 @@
 
     /usr/bin/python3 f.py
 """
-from exact import beta_tails, exp, log, mpf, root, write
+from exact import beta_tails, exp, log, log_quantile, mpf, write
 
 SHAPES = [0.05, 0.25, 0.5, 1, 2.5, 7, 9.9, 10.1, 24, 88, 500, 3e4, 1e6, 5e11]
 TAILS = [0.499, 0.3, 0.1, 0.025, 1e-3, 1e-7, 1e-14, 1e-30, 1e-120, 1e-300]
@@ -11,18 +11,7 @@ TAILS = [0.499, 0.3, 0.1, 0.025, 1e-3, 1e-7, 1e-14, 1e-30, 1e-120, 1e-300]
 
 def log_odds(p, a, b):
     """The log odds below which lies p."""
-
-    def excess(u):
-        lower = beta_tails(a, b, exp(u))[0]
-        return log(max(lower, mpf(10) ** -390)) - log(mpf(p))
-
-    low = high = log(mpf(a) / mpf(b))
-    step = 1 / mpf(a + b) ** 0.5
-    while excess(low) > 0:
-        low, step = low - step, 2 * step
-    while excess(high) < 0:
-        high, step = high + step, 2 * step
-    return root(excess, low, high)
+    return log_quantile(lambda u: beta_tails(a, b, exp(u))[0], p, log(mpf(a) / mpf(b)), 1 / mpf(a + b) ** 0.5)
 
 
 quantiles = []
