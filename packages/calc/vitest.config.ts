@@ -1,5 +1,8 @@
 import { defineConfig } from 'vitest/config';
 
 export default defineConfig({
-  test: { include: ['test/**/*.test.ts'], reporters: ['default', ['json', { outputFile: 'reports/vitest.json' }]] },
+  test: {
+    include: ['test/**/*.test.ts'],
+    reporters: ['default', ['json', { outputFile: 'reports/vitest.json' }]],
+  },
 });

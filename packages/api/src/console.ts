@@ -11,8 +11,8 @@ export function say(line: string): void {
 /** Where people reach the server from this machine, or from anywhere where the settings say so. */
 export function addressOf({ url, host, port }: Settings): string {
   if (url) return url;
-  const everywhere = host === '0.0.0.0' || host === '::';
-  const name = everywhere ? '127.0.0.1' : host.includes(':') ? `[${host}]` : host;
+  const here = ['127.0.0.1', '0.0.0.0', '::'].includes(host);
+  const name = here ? 'localhost' : host.includes(':') ? `[${host}]` : host;
   return `http://${name}:${port}`;
 }
 

@@ -73,8 +73,8 @@ describe('Settings', () => {
   });
 
   test.each([
-    [{}, 'http://127.0.0.1:4310'],
-    [{ HOST: '0.0.0.0', PORT: '80' }, 'http://127.0.0.1:80'],
+    [{}, 'http://localhost:4310'],
+    [{ HOST: '0.0.0.0', PORT: '80' }, 'http://localhost:80'],
     [{ HOST: '::1' }, 'http://[::1]:4310'],
     [{ STEELYARD_URL: 'https://steelyard.example' }, 'https://steelyard.example'],
   ])('say where people reach the server: %j', (environment, address) => {

@@ -104,16 +104,25 @@ function testSteps(bound: Bound, { analysis, criticalValue, powers }: Evaluated)
 function answerSteps({ request, plan, outcomes }: Bound, solution: Solution, evaluated: Evaluated): Step[] {
   const { aim } = request;
   if (aim.find === 'size') {
-    const unrounded = solution.unroundedUnits;
-    return [
-      {
-        label: `Fewest ${plan.unitName} that reach the power`,
-        formula: '\\min\\{u:1-\\beta(u)\\ge 1-\\beta_{\\mathrm{aim}}\\}',
-        substituted: `1-\\beta(${solution.units})=${tex(evaluated.power)}\\ge${tex(aim.power)}${unrounded === undefined ? '' : `,\\quad u=${tex(unrounded)}\\text{ unrounded}`}`,
-        value: solution.units,
-        source: 'Search over whole units, on the power above',
-      },
-    ];
+    const fewest: Step = {
+      label: `Fewest ${plan.unitName} that reach the power`,
+      formula: '\\min\\{u:1-\\beta(u)\\ge 1-\\beta_{\\mathrm{aim}}\\}',
+      substituted: `1-\\beta(${solution.units})=${tex(evaluated.power)}\\ge${tex(aim.power)}`,
+      value: solution.units,
+      source: 'Search over whole units, on the power above',
+    };
+    return solution.unroundedUnits === undefined
+      ? [fewest]
+      : [
+          fewest,
+          {
+            label: 'The same before rounding up',
+            formula: '1-\\beta(u)=1-\\beta_{\\mathrm{aim}}',
+            substituted: `1-\\beta(${tex(solution.unroundedUnits)})=${tex(aim.power)}`,
+            value: solution.unroundedUnits,
+            source: 'The power above, for real-valued arms of equal size',
+          },
+        ];
   }
   if (aim.find === 'cluster-size') {
     return [
