@@ -1,6 +1,5 @@
 #!/usr/bin/env node
 import { readFileSync } from 'node:fs';
-import { exit, stderr, stdout } from 'node:process';
 
 const usage = `Usage: steelyard-calc <appraise|explain> <request.json|-> [--lines]
 
@@ -12,25 +11,24 @@ const usage = `Usage: steelyard-calc <appraise|explain> <request.json|-> [--line
 `;
 
 function fail(error) {
-  stderr.write(`${JSON.stringify({ error })}\n`);
-  exit(2);
+  process.stderr.write(`${JSON.stringify({ error })}\n`);
+  process.exit(2);
 }
 
 const words = process.argv.slice(2);
 const lines = words.includes('--lines');
 const [command, file, ...rest] = words.filter((word) => word !== '--lines');
 if (words.includes('--help') || words.includes('-h')) {
-  stdout.write(usage);
-  exit(0);
+  process.stdout.write(usage);
+  process.exit(0);
 }
 if (!['appraise', 'explain'].includes(command ?? '') || file === undefined || rest.length > 0) {
-  stderr.write(usage);
-  exit(2);
+  fail({ code: 'schema', path: '', message: usage });
 }
 
 const calc = await import('../dist/index.js').catch(() => {
-  stderr.write('The calculation is not built yet: run "npm run build -w @steelyard/calc" first.\n');
-  exit(1);
+  process.stderr.write('The calculation is not built yet: run "npm run build -w @steelyard/calc" first.\n');
+  process.exit(1);
 });
 
 let input;
@@ -52,11 +50,11 @@ function answer(request, index) {
 
 if (Array.isArray(input)) {
   const answers = input.map(answer);
-  stdout.write(
+  process.stdout.write(
     lines
       ? answers.map((each) => `${JSON.stringify(each)}\n`).join('')
       : `${JSON.stringify(answers, null, 2)}\n`,
   );
 } else {
-  stdout.write(`${JSON.stringify(answer(input), null, lines ? 0 : 2)}\n`);
+  process.stdout.write(`${JSON.stringify(answer(input), null, lines ? 0 : 2)}\n`);
 }

@@ -1,4 +1,4 @@
-/** What a request comes to. Field by field, the JSON contract of the README; proportions in 0–1, months real. */
+/** What a request comes to. Proportions in 0–1, months real. */
 export type Appraisal = Feasible | Infeasible;
 
 export interface Infeasible {

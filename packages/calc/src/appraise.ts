@@ -1,4 +1,4 @@
-import type { Appraisal, ComparisonResult, Feasible } from './appraisal.js';
+import type { Appraisal, Caution, ComparisonResult, Feasible } from './appraisal.js';
 import { type Bound, bind, type Evaluated } from './bind.js';
 import { generalCautions } from './cautions.js';
 import { costSheet } from './costs/cost-sheet.js';
@@ -18,11 +18,7 @@ export function appraise(request: AppraisalRequest): Appraisal {
   const bound = bind(parseRequest(request));
   const solution = solve(bound);
   if ('code' in solution) {
-    return {
-      feasible: false,
-      infeasible: solution,
-      cautions: generalCautions(bound.request, bound.outcomes.length, []),
-    };
+    return { feasible: false, infeasible: solution, cautions: infeasibleCautions(bound) };
   }
   return feasible(bound, solution);
 }
@@ -49,7 +45,7 @@ function feasible(bound: Bound, solution: Solution): Feasible {
     criticalValue: evaluated.criticalValue,
     df: evaluated.analysis.df,
     comparisons: comparisonResults(evaluated),
-    cautions: [...plan.cautions(layout), ...generalCautions(request, outcomes.length, missing)],
+    cautions: [...plan.cautions(layout, outcomes), ...generalCautions(request, outcomes.length, missing)],
   };
   setDefined(appraisal, {
     unroundedUnits: solution.unroundedUnits,
@@ -63,6 +59,15 @@ function feasible(bound: Bound, solution: Solution): Feasible {
     timeline,
   });
   return appraisal;
+}
+
+/** Without an answer there are still the cautions of the size asked about, where the aim names one. */
+function infeasibleCautions(bound: Bound): Caution[] {
+  const { request, plan, outcomes } = bound;
+  if (!('units' in request.aim)) return generalCautions(request, outcomes.length, []);
+  const layout = plan.layout(request.aim.units);
+  const { missing } = moneyAndTime(bound, layout, totalsOf(layout));
+  return [...plan.cautions(layout, outcomes), ...generalCautions(request, outcomes.length, missing)];
 }
 
 /** The first comparison's standard error, and half the width of its unadjusted interval. */

@@ -16,7 +16,8 @@ export function generalCautions(
       source: 'CONSORT extension for multi-arm trials, 2019',
     });
   }
-  if ((attrition?.participants ?? 0) > 0.2 || (attrition?.units ?? 0) > 0.2) {
+  const kept = (1 - (attrition?.participants ?? 0)) * (1 - (attrition?.units ?? 0));
+  if (kept < 0.8 - 1e-12) {
     cautions.push({
       code: 'high-attrition',
       message:

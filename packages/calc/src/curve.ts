@@ -37,9 +37,10 @@ export function curve(request: AppraisalRequest, spec: CurveSpec): CurvePoint[] 
   }
   if (spec.over === 'units') {
     const lowest = bound.plan.minimumUnits;
+    const clusterSize = clusterSizeOf(bound);
     return sizesOf(spec)
       .filter((units) => units >= lowest)
-      .map((units) => curvePoint(bound, units, units, bound.plan.clusterSize));
+      .map((units) => curvePoint(bound, units, units, clusterSize));
   }
   if (bound.plan.clusterSize === undefined) {
     throw new CalcError(
@@ -55,6 +56,13 @@ export function curve(request: AppraisalRequest, spec: CurveSpec): CurvePoint[] 
 function sizesOf({ from, to, points }: CurveSpec): number[] {
   const step = (to - from) / (points - 1);
   return [...new Set(Array.from({ length: points }, (_, index) => Math.round(from + index * step)))];
+}
+
+/** The request's own, or what the aim asks for where that is the cluster size. */
+function clusterSizeOf(bound: Bound): number | undefined {
+  if (bound.request.aim.find !== 'cluster-size') return bound.plan.clusterSize;
+  const solution = solve(bound);
+  return 'code' in solution ? bound.plan.clusterSize : solution.clusterSize;
 }
 
 function unitsOf(bound: Bound): number {

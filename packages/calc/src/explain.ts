@@ -3,7 +3,7 @@ import { moneyAndTime } from './appraise.js';
 import { type Bound, bind, type Evaluated } from './bind.js';
 import type { Layout } from './designs/family.js';
 import { outcomeSteps } from './explain/outcome-steps.js';
-import { tex } from './explain/tex.js';
+import { tex, texAmount } from './explain/tex.js';
 import type { OutcomeModel } from './outcomes/outcome-model.js';
 import { type AppraisalRequest, parseRequest } from './parse-request.js';
 import { type Solution, solve } from './solve.js';
@@ -24,7 +24,10 @@ export function explain(request: AppraisalRequest): Step[] {
         formula: '1-\\beta_{\\max}',
         substituted: tex(solution.limitingPower ?? 0),
         value: solution.limitingPower ?? 0,
-        source: 'Hemming, Girling, Sitch, Marsh & Lilford 2011, BMC Med Res Methodol 11:102',
+        source:
+          solution.code === 'clusters'
+            ? 'After Hemming, Girling, Sitch, Marsh & Lilford 2011, BMC Med Res Methodol 11:102'
+            : 'The power equation, at its limit',
       },
     ];
   }
@@ -65,8 +68,8 @@ function testSteps(bound: Bound, { analysis, criticalValue, powers }: Evaluated)
   const tailFormula = test.sides === 2 ? `${alpha}/2` : alpha;
   steps.push({
     label: `Critical value, ${test.sides === 2 ? 'two-sided' : 'one-sided'}`,
-    formula: df === null ? `c=z_{1-${tailFormula}}` : `c=t_{\\nu,\\,1-${tailFormula}}`,
-    substituted: df === null ? `z_{${tex(1 - tail)}}` : `t_{${tex(df)},\\,${tex(1 - tail)}}`,
+    formula: df === null ? `P(Z>c)=${tailFormula}` : `P(T_\\nu>c)=${tailFormula}`,
+    substituted: df === null ? `P(Z>c)=${tex(tail)}` : `P(T_{${tex(df)}}>c)=${tex(tail)}`,
     value: criticalValue,
     source: df === null ? 'Normal distribution' : 'Student’s t distribution',
   });
@@ -187,7 +190,7 @@ function monthsStep(timeline: NonNullable<Feasible['timeline']>): Step {
   return {
     label: `Months: ${timeline.phases.map((phase) => phase.label.toLowerCase()).join(', ')}`,
     formula: '\\sum\\text{phases}',
-    substituted: timeline.phases.map((phase) => tex(phase.to - phase.from)).join('+'),
+    substituted: timeline.phases.map((phase) => texAmount(phase.to - phase.from)).join('+'),
     value: timeline.months,
     source: 'The study’s timeline',
   };
@@ -197,7 +200,7 @@ function costStep(costs: NonNullable<Feasible['costs']>, { request }: Bound): St
   return {
     label: `Cost, ${request.costs?.currency}: ${costs.lines.map((line) => line.label.toLowerCase()).join('; ')}`,
     formula: '\\sum\\text{quantity}\\times\\text{rate}',
-    substituted: costs.lines.map((line) => tex(line.amount)).join('+'),
+    substituted: costs.lines.map((line) => texAmount(line.amount)).join('+'),
     value: costs.total,
     source: 'The study’s cost plan',
   };

@@ -114,7 +114,7 @@ export const testSchema = z.strictObject({
   hypothesis: z.enum(['superiority', 'non-inferiority', 'equivalence']),
   alpha: z
     .number({ error: 'The type I error must be a number.' })
-    .gt(0, 'The type I error must be above 0.')
+    .min(1e-9, 'The type I error must be 0.000000001 or more.')
     .max(0.5, 'The type I error must be 0.5 or less.'),
   sides: z.union([z.literal(1), z.literal(2)], { error: 'A test has one side or two.' }),
   margin: positive('The margin').optional(),

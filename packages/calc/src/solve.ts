@@ -111,7 +111,8 @@ function unroundedUnits(bound: Bound, guess: number, power: number): number | un
   if (close !== undefined) return close * close;
   const covariates = bound.outcomes[0]?.covariates ?? 0;
   const lowest = bound.plan.hasDf ? 1 + covariates / 2 + 1e-6 : 1e-6;
-  const { root, converged } = findRoot(surplus, Math.sqrt(lowest), 2 * near, { tolerance: 1e-14 });
+  const highest = 2 * Math.max(near, Math.sqrt(bound.plan.minimumUnits));
+  const { root, converged } = findRoot(surplus, Math.sqrt(lowest), highest, { tolerance: 1e-14 });
   return converged ? root * root : undefined;
 }
 

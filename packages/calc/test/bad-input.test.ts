@@ -102,6 +102,40 @@ describe('a request that breaks a bound', () => {
   });
 });
 
+describe('extreme figures', () => {
+  it('are answered at once and without a hole', () => {
+    const baseline = { baselines: 1, followUps: 1, correlation: 0.5 };
+    for (const difference of [1, 1e6, 1e12]) {
+      for (const aim of [
+        { find: 'power', units: 2 },
+        { find: 'effect', units: 2, power: 0.8 },
+        { find: 'size', power: 0.999 },
+      ] as const) {
+        const appraisal = appraise({
+          ...twoMeans,
+          outcome: { kind: 'continuous', difference, sd: 1, repeated: baseline },
+          test: { hypothesis: 'superiority', alpha: 1e-9, sides: 1 },
+          aim,
+        });
+        if (!appraisal.feasible) throw new Error(appraisal.infeasible.message);
+        expect(appraisal.power).toBeGreaterThan(0);
+        expect(appraisal.power).toBeLessThanOrEqual(1);
+        if (aim.find === 'effect') expect(appraisal.detectable).toBeGreaterThan(0);
+      }
+    }
+  });
+
+  it('have an unrounded size too where two in each arm suffice', () => {
+    for (const difference of [5, 10, 20]) {
+      const { unroundedUnits, units } = appraise({
+        ...twoMeans,
+        outcome: { kind: 'continuous', difference, sd: 1 },
+      }) as { unroundedUnits: number; units: number };
+      expect(Math.max(2, Math.ceil(unroundedUnits))).toBe(units);
+    }
+  });
+});
+
 describe('an aim out of reach', () => {
   it('answers with the limiting power and the fewest clusters that would do', () => {
     const appraisal = appraise({

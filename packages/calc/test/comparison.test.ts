@@ -264,7 +264,7 @@ describe('the verdict', () => {
 
   it('counts the clusters that do not exist in the words of the study', () => {
     expect(verdict(weigh(schools), girls)).toEqual({
-      headline: 'A does not fit.',
+      headline: 'No option fits every limit.',
       detail: 'A needs 12 catchments that do not exist.',
     });
   });

@@ -80,6 +80,10 @@ for (const family of familyIds) {
         ]) {
           expect(values).toContain(figure);
         }
+        for (const { substituted, value } of explain(request)) {
+          expect(Number.isFinite(value)).toBe(true);
+          expect(substituted).not.toMatch(/--|\\times-|10\^\{-?\d+\}\^/);
+        }
       }, 100);
     });
 

@@ -14,19 +14,20 @@ export function appraiseAt(request: AppraisalRequest, units: number, clusterSize
 }
 
 /**
- * The most units that `fits` allows, or undefined where not even the fewest do, or where there is no end to them.
+ * The most units that `fits` allows: 0 where not even the fewest do, Infinity where there is no end to them.
  * `fits` must not come true again for a larger size: money, months and clusters only grow.
  */
 export function mostUnits(
   request: AppraisalRequest,
   fits: (appraisal: Feasible) => boolean,
   clusterSize?: number,
-): number | undefined {
+): number {
   const from = bind(parseRequest(request)).plan.minimumUnits;
   const tooMany = smallestInteger((units) => !fits(appraiseAt(request, units, clusterSize)), {
     from,
     to: largestCount,
     guess: 64,
   });
-  return tooMany === undefined || tooMany === from ? undefined : tooMany - 1;
+  if (tooMany === undefined) return Number.POSITIVE_INFINITY;
+  return tooMany === from ? 0 : tooMany - 1;
 }

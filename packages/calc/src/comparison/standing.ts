@@ -12,7 +12,7 @@ export interface Standing {
   uses: Use[];
   /** The limits it breaks; the first is the binding one. */
   breaches: Use[];
-  /** The most power the limits leave it, where it breaks one. */
+  /** The most power the limits leave it, where it breaks one, over a spread of cluster sizes. */
   within: {
     units: number;
     clusterSize?: number;
@@ -20,7 +20,7 @@ export interface Standing {
     participants: number;
     power: number;
   } | null;
-  /** The smallest change of limits that would admit it; with the cluster size that makes do with it. */
+  /** The smallest change of limits found that would admit it; none where another cluster size fits as it is. */
   relaxation: { changes: { limit: LimitKey; from: number; to: number }[]; clusterSize?: number } | null;
 }
 
@@ -39,7 +39,7 @@ export function standingOf(
     reachesPower,
     uses,
     breaches,
-    within: breaches.length === 0 ? null : mostPowerWithin(limits, request),
+    within: breaches.length === 0 ? null : mostPowerWithin(limits, power, request),
     relaxation: fits ? null : smallestRelaxation(limits, power, request),
   };
 }
@@ -51,31 +51,43 @@ function largestClusterSize(limits: Limits, { attrition }: AppraisalRequest): nu
   return Math.max(1, Math.floor(participantsPerCluster * (1 - (attrition?.participants ?? 0)) + 1e-9));
 }
 
+/** The option's own cluster size and others spread over what the limits allow, where there is one to choose. */
 function clusterSizesWithin(limits: Limits, request: AppraisalRequest): (number | undefined)[] {
   if (!('clusterSize' in request.design)) return [undefined];
   const own = request.design.clusterSize;
-  const largest = largestClusterSize(limits, request);
-  return largest === undefined ? [own] : [...new Set([Math.min(own, largest), largest])];
+  const largest = largestClusterSize(limits, request) ?? own;
+  const spread = Array.from({ length: 8 }, (_, step) => Math.ceil(largest ** ((step + 1) / 8)));
+  return [...new Set([Math.min(own, largest), ...spread])];
 }
 
-function mostPowerWithin(limits: Limits, request: AppraisalRequest): Standing['within'] {
+/** The most power among sizes that break no limit; where nothing limits the number, the size the power asks for. */
+function mostPowerWithin(limits: Limits, power: number, request: AppraisalRequest): Standing['within'] {
   const fits = (appraisal: Feasible) => !usesOf(limits, request, appraisal).some(breaks);
   const candidates = clusterSizesWithin(limits, request).flatMap((clusterSize) => {
     const units = mostUnits(request, fits, clusterSize);
-    return units === undefined ? [] : [appraiseAt(request, units, clusterSize)];
+    if (units === 0) return [];
+    if (Number.isFinite(units)) return [appraiseAt(request, units, clusterSize)];
+    const sized = appraise(sizedFor(power, request, clusterSize));
+    return sized.feasible ? [sized] : [];
   });
   const best = candidates.reduce<Feasible | null>(
     (most, each) => (most && most.power >= each.power ? most : each),
     null,
   );
   if (!best) return null;
-  const { units, clusterSize, clusters, participants, power } = best;
-  return { units, participants, power, ...(clusterSize && { clusterSize }), ...(clusters && { clusters }) };
+  const { units, clusterSize, clusters, participants } = best;
+  return {
+    units,
+    participants,
+    power: best.power,
+    ...(clusterSize && { clusterSize }),
+    ...(clusters && { clusters }),
+  };
 }
 
 /**
- * The limits that would have to move, and how far: for each cluster size the limits allow, the design is sized for the
- * power, and the one that breaks the fewest limits, by the smallest share, is taken.
+ * The limits that would have to move, and how far: at each of the cluster sizes above the design is sized for the
+ * power, and the one that breaks the fewest limits, by the smallest share, is taken; its own size where it ties.
  */
 function smallestRelaxation(
   limits: Limits,
@@ -83,13 +95,11 @@ function smallestRelaxation(
   request: AppraisalRequest,
 ): Standing['relaxation'] {
   const ways = clusterSizesWithin(limits, request).flatMap((clusterSize) => {
-    const sized: AppraisalRequest = { ...request, aim: { find: 'size', power } };
-    const appraisal = appraise(withClusterSize(sized, clusterSize));
+    const appraisal = appraise(sizedFor(power, request, clusterSize));
     if (!appraisal.feasible) return [];
     const breaches = usesOf(limits, request, appraisal).filter(breaks);
-    return [
-      { clusterSize, breaches, share: Math.max(0, ...breaches.map(({ over, allowed }) => over / allowed)) },
-    ];
+    const share = Math.max(0, ...breaches.map(({ over, allowed }) => over / allowed));
+    return [{ clusterSize, breaches, share }];
   });
   const [least] = ways.sort((a, b) => a.breaches.length - b.breaches.length || a.share - b.share);
   if (!least) return null;
@@ -102,8 +112,11 @@ function smallestRelaxation(
   };
 }
 
-function withClusterSize(request: AppraisalRequest, clusterSize: number | undefined): AppraisalRequest {
-  return clusterSize === undefined
-    ? request
-    : ({ ...request, design: { ...request.design, clusterSize } } as AppraisalRequest);
+function sizedFor(
+  power: number,
+  request: AppraisalRequest,
+  clusterSize: number | undefined,
+): AppraisalRequest {
+  const design = clusterSize === undefined ? request.design : { ...request.design, clusterSize };
+  return { ...request, design, aim: { find: 'size', power } } as AppraisalRequest;
 }

@@ -42,10 +42,13 @@ export function verdict(weighed: readonly WeighedOption[], words: VerdictWords):
   }
   const fitting = sized.filter(({ standing }) => standing?.fits ?? true);
   const failing = sized.filter((option) => !fitting.includes(option));
-  const limited = failing.length > 0 || sized.some(({ standing }) => standing && standing.uses.length > 0);
+  const limits = sized.some(({ standing }) => standing && standing.uses.length > 0);
+  const limited = limits || failing.length > 0;
   const ahead = fitting.length > 1 ? leaderOf(fitting, words) : null;
   return {
-    headline: limited ? limitHeadline(fitting, sized, ahead) : openHeadline(sized, ahead, words),
+    headline: limited
+      ? limitHeadline(fitting, admitted.length, ahead, limits)
+      : openHeadline(sized, ahead, words),
     detail: sentences([
       ...(ahead?.others ?? []),
       ahead && !limited ? behind(ahead.leader, fitting, words) : '',
@@ -55,16 +58,23 @@ export function verdict(weighed: readonly WeighedOption[], words: VerdictWords):
   };
 }
 
-function limitHeadline(fitting: readonly Sized[], sized: readonly Sized[], ahead: Leader | null): string {
+/** Every admitted option is counted, also those that could not be sized. */
+function limitHeadline(
+  fitting: readonly Sized[],
+  admitted: number,
+  ahead: Leader | null,
+  limits: boolean,
+): string {
+  const [one, many] = limits
+    ? ['fits every limit', 'fit every limit']
+    : ['reaches the power', 'reach the power'];
   const [only] = fitting;
-  if (!only) return sized.length === 1 ? `${sized[0]?.letter} does not fit.` : 'No option fits every limit.';
-  if (fitting.length === 1) {
-    return sized.length === 1 ? `${only.letter} fits every limit.` : `Only ${only.letter} fits every limit.`;
-  }
+  if (!only) return `No option ${one}.`;
+  if (fitting.length === 1) return `${admitted === 1 ? '' : 'Only '}${only.letter} ${one}.`;
   const who =
-    fitting.length === sized.length
-      ? 'Every option fits'
-      : `${list(fitting.map(({ letter }) => letter))} fit every limit`;
+    fitting.length === admitted
+      ? `Every option ${one}`
+      : `${list(fitting.map(({ letter }) => letter))} ${many}`;
   return ahead ? `${who}; ${ahead.leader.letter} ${list(ahead.won)}.` : `${who}.`;
 }
 
@@ -79,7 +89,7 @@ function openHeadline(sized: readonly Sized[], ahead: Leader | null, words: Verd
     ];
     return `${first.letter} takes ${list(facts)}.`;
   }
-  if (!ahead) return 'The options come out level.';
+  if (!ahead) return 'No option is ahead of all others on any count.';
   const held = {
     power: `At power ${percent(words.hold.power)}`,
     budget: 'Within the budget',
@@ -95,8 +105,9 @@ interface Leader {
   others: string[];
 }
 
-function leaderOf(options: readonly Sized[], { participants }: VerdictWords): Leader | null {
+function leaderOf(options: readonly Sized[], { hold, participants }: VerdictWords): Leader | null {
   const measures: [string, (appraisal: Feasible) => number | undefined][] = [
+    ['has the most power', ({ power }) => (hold.kind === 'power' ? undefined : -power)],
     ['costs least', ({ costs }) => costs?.total],
     ['ends first', ({ timeline }) => timeline?.months],
     [`recruits the fewest ${participants.many}`, ({ recruited }) => recruited],
@@ -149,7 +160,10 @@ function whyNotFitting({ letter, appraisal, standing }: Sized, words: VerdictWor
   const breaches = standing?.breaches ?? [];
   const reasons = breaches.map((use) => breachWords[use.limit](use, words));
   if (standing && !standing.reachesPower) {
-    reasons.unshift(`reaches ${percent(appraisal.power)} of the ${percent(words.hold.power)} asked for`);
+    const [reached, asked] = [percent(appraisal.power), percent(words.hold.power)];
+    reasons.unshift(
+      reached === asked ? `stays just under ${asked}` : `reaches ${reached} of the ${asked} asked for`,
+    );
   }
   return `${letter} ${list(reasons)}`;
 }
@@ -159,7 +173,7 @@ const breachWords: Record<LimitKey, (use: Use, words: VerdictWords) => string> =
     `needs ${count(over)} ${clusters ? noun(clusters, over) : 'clusters'} that do not exist`,
   participantsPerCluster: ({ over }, { participants, clusters }) =>
     `needs ${count(over)} ${noun(participants, over)} more in each ${clusters?.one ?? 'cluster'} than there are`,
-  money: ({ over }, { currency }) => `costs ${money(over, currency)} too much`,
+  money: ({ over }, { currency }) => `costs ${over < 1 ? 'a little' : money(over, currency)} too much`,
   months: ({ over }) => (over < 0.5 ? 'ends less than a month late' : `ends ${months(over)} late`),
 };
 

@@ -58,11 +58,14 @@ function aimUnder(hold: Hold, request: AppraisalRequest, { units }: OptionPlan):
   if (!request.costs)
     throw new CalcError('schema', 'costs', 'State the costs: a budget buys nothing without them.');
   const bought = mostUnits(request, ({ costs }) => (costs?.total ?? 0) <= hold.budget);
-  if (bought === undefined) {
+  if (bought === 0) {
+    throw new CalcError('schema', 'hold.budget', 'The budget does not buy even the smallest size.');
+  }
+  if (bought === Number.POSITIVE_INFINITY) {
     throw new CalcError(
       'schema',
-      'hold.budget',
-      'The budget does not buy even the smallest size, or it has no end.',
+      'costs',
+      'Nothing here costs more for a larger size: a budget sets no end to it.',
     );
   }
   return { find: 'power', units: bought };

@@ -26,9 +26,10 @@ export function costSheet(
     return amount;
   };
 
+  const clustered = totals.recruitedClusters !== undefined;
   const shared =
     charge('Fixed', 1, plan.fixed) +
-    charge('Clusters', totals.recruitedClusters ?? 0, plan.perCluster) +
+    (clustered ? charge('Clusters', totals.recruitedClusters ?? 0, plan.perCluster) : 0) +
     charge('Recruited participants', totals.recruited, plan.perRecruited) +
     (months === undefined ? 0 : charge('Months', months, plan.perMonth));
   const perMeasurement = charge('Measurements', totals.measurements, plan.perMeasurement);
@@ -40,7 +41,9 @@ export function costSheet(
       (plan.perArm ?? 0) +
       (perMeasurement === 0 ? 0 : (perMeasurement * arm.measurements) / totals.measurements) +
       charge(`Exposures, ${arm.label}`, arm.exposures, plan.perExposure?.[index]) +
-      charge(`Cluster-periods, ${arm.label}`, arm.clusterPeriods, plan.perClusterPeriod?.[index]);
+      (clustered
+        ? charge(`Cluster-periods, ${arm.label}`, arm.clusterPeriods, plan.perClusterPeriod?.[index])
+        : 0);
     const share = (shared * arm.exposures) / totals.exposures;
     const total = (direct + share) * overhead;
     return {

@@ -6,7 +6,7 @@ export function ceilForgiving(x: number): number {
 /** Analysed units of each group when the base group, the first, has `units`. */
 export function groupSizes(units: number, allocation: readonly number[]): number[] {
   const base = allocation[0] ?? 1;
-  return allocation.map((share) => ceilForgiving((units * share) / base));
+  return allocation.map((share) => ceilForgiving(units * (share / base)));
 }
 
 /** Fewest base units at which every group has `least`. */

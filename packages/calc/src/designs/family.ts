@@ -41,7 +41,7 @@ export interface DesignPlan {
   /** How months pass after recruitment: one follow-up, or periods with washouts between. */
   periods?: number;
   designEffect?(clusterSize: number): number;
-  cautions(layout: Layout): Caution[];
+  cautions(layout: Layout, outcomes: readonly OutcomeModel[]): Caution[];
   /** The lines of the working that are this family's own: from the effect to the standard error and df. */
   steps(result: WorkedSize, outcomes: readonly OutcomeModel[]): Step[];
 }

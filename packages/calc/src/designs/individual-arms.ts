@@ -1,5 +1,6 @@
 import type { Caution, Step } from '../appraisal.js';
-import { tex } from '../explain/tex.js';
+import { activeSymbol } from '../explain/outcome-steps.js';
+import { tex, texFactor } from '../explain/tex.js';
 import type { OutcomeModel } from '../outcomes/outcome-model.js';
 import type { Outcome, RequestFor } from '../request.js';
 import type { Analysis, Contrast } from '../tests/analysis.js';
@@ -21,7 +22,7 @@ export function individualArmsPlan(
     groupUnits: (units) => groupSizes(units, allocation),
     analyse: (sizes, outcomes) => analyseArms(sizes, outcomes),
     layout: (units) => individualLayout(request, arms, groupSizes(units, allocation)),
-    cautions: (layout) => individualCautions(request, allocation, layout),
+    cautions: (layout, outcomes) => individualCautions(request, allocation, layout, outcomes),
   };
 }
 
@@ -95,6 +96,7 @@ function individualCautions(
   { outcome }: RequestFor<unknown>,
   allocation: readonly number[],
   layout: Layout,
+  outcomes: readonly OutcomeModel[],
 ): Caution[] {
   const cautions: Caution[] = [];
   const participants = layout.groups.reduce((sum, group) => sum + group.participants, 0);
@@ -118,9 +120,9 @@ function individualCautions(
     }
   }
   if (outcome.kind === 'binary') {
-    const { control, active } = outcome;
     const fewest = Math.min(
       ...layout.groups.map(({ participants: n }, arm) => {
+        const [control = 0, active = 0] = outcomes[Math.max(0, arm - 1)]?.proportions ?? [];
         const p = arm === 0 ? control : active;
         return n * Math.min(p, 1 - p);
       }),
@@ -136,45 +138,81 @@ function individualCautions(
   return cautions;
 }
 
-/** The working of one arm against control: variance, standard error and df. */
+/**
+ * The working of each arm against control: effect and standard error, then the df they share. Arms of one size
+ * and effect are worked once.
+ */
 export function armSteps(
   request: RequestFor<unknown>,
-  outcome: OutcomeModel,
+  outcomes: readonly OutcomeModel[],
   sizes: readonly number[],
   analysis: Analysis,
 ): Step[] {
+  const n0 = sizes[0] as number;
+  const alike = (a: number, b: number) =>
+    sizes[a + 1] === sizes[b + 1] && outcomes[a]?.target === outcomes[b]?.target;
+  const steps = analysis.contrasts.flatMap((contrast, index) => {
+    const first = analysis.contrasts.findIndex((_, other) => alike(index, other));
+    if (first !== index) return [];
+    const of = index === 0 ? '' : `, Active ${contrast.arm}`;
+    const outcome = outcomes[index] as OutcomeModel;
+    const ownEffect = outcome.target !== outcomes[0]?.target ? [effectStep(contrast, of)] : [];
+    return [...ownEffect, ...contrastSteps(contrast, outcome, n0, sizes[index + 1] as number, of)];
+  });
+  if (analysis.df === null) return steps;
+  return [...steps, dfStep(request, outcomes[0] as OutcomeModel, sizes, analysis.df)];
+}
+
+function effectStep({ effect }: Contrast, of: string): Step {
+  return {
+    label: `Effect${of}`,
+    formula: '\\delta',
+    substituted: tex(effect),
+    value: effect,
+    source: 'The effect stated for this arm, after dilution',
+  };
+}
+
+function contrastSteps(
+  contrast: Contrast,
+  outcome: OutcomeModel,
+  n0: number,
+  n1: number,
+  of: string,
+): Step[] {
   const [v0, v1] = outcome.variances;
-  const [n0 = 0, n1 = 0] = sizes;
-  const contrast = analysis.contrasts[0] as Contrast;
+  const [p0 = 0, p1 = 0] = outcome.proportions ?? [];
+  const active = activeSymbol(outcome);
   const steps: Step[] = [
     {
-      label: 'Standard error of the effect',
+      label: `Standard error of the effect${of}`,
       formula: '\\mathrm{SE}=\\sqrt{\\frac{v_0}{n_0}+\\frac{v_1}{n_1}}',
       substituted: `\\sqrt{\\frac{${tex(v0)}}{${tex(n0)}}+\\frac{${tex(v1)}}{${tex(n1)}}}`,
       value: contrast.standardError,
-      source: 'Julious 2004, Stat Med 23:1921',
+      source: outcome.proportions
+        ? 'Fleiss, Levin & Paik 2003; Cohen 1988 on the arcsine scale'
+        : 'Julious 2004, Stat Med 23:1921',
     },
   ];
   if (contrast.nullStandardError !== undefined) {
+    const pooled = (n0 * p0 + n1 * p1) / (n0 + n1);
     steps.push({
-      label: 'Standard error under no difference',
-      formula:
-        '\\mathrm{SE}_0=\\sqrt{\\bar p\\,(1-\\bar p)\\left(\\tfrac1{n_0}+\\tfrac1{n_1}\\right)},\\quad \\bar p=\\frac{n_0p_0+n_1p_1}{n_0+n_1}',
-      substituted: `\\sqrt{${tex(contrast.nullStandardError ** 2 / (1 / n0 + 1 / n1))}\\left(\\tfrac1{${tex(n0)}}+\\tfrac1{${tex(n1)}}\\right)}`,
+      label: `Standard error under no difference${of}`,
+      formula: `\\mathrm{SE}_0=\\sqrt{\\bar p\\,(1-\\bar p)\\left(\\tfrac1{n_0}+\\tfrac1{n_1}\\right)},\\quad \\bar p=\\frac{n_0p_0+n_1${active}}{n_0+n_1}`,
+      substituted: `\\sqrt{${tex(pooled)}\\,(1-${tex(pooled)})\\left(\\tfrac1{${tex(n0)}}+\\tfrac1{${tex(n1)}}\\right)}`,
       value: contrast.nullStandardError,
       source: 'Fleiss, Levin & Paik 2003',
     });
   }
   if (contrast.correction !== undefined) {
     steps.push({
-      label: 'Continuity correction, taken off the effect',
+      label: `Continuity correction, taken off the effect${of}`,
       formula: '\\tfrac12\\left(\\tfrac1{n_0}+\\tfrac1{n_1}\\right)',
       substituted: `\\tfrac12\\left(\\tfrac1{${tex(n0)}}+\\tfrac1{${tex(n1)}}\\right)`,
       value: contrast.correction,
       source: 'Casagrande, Pike & Smith 1978; Fleiss, Tytun & Ury 1980',
     });
   }
-  if (analysis.df !== null) steps.push(dfStep(request, outcome, sizes, analysis.df));
   return steps;
 }
 
@@ -190,7 +228,7 @@ function dfStep(
     return {
       label: 'Degrees of freedom',
       formula: '\\nu=\\frac{(v_0/n_0+v_1/n_1)^2}{\\frac{(v_0/n_0)^2}{n_0-1}+\\frac{(v_1/n_1)^2}{n_1-1}}',
-      substituted: `\\frac{(${tex(v0 / n0)}+${tex(v1 / n1)})^2}{\\frac{${tex(v0 / n0)}^2}{${tex(n0 - 1)}}+\\frac{${tex(v1 / n1)}^2}{${tex(n1 - 1)}}}`,
+      substituted: `\\frac{(${tex(v0 / n0)}+${tex(v1 / n1)})^2}{\\frac{${texFactor(v0 / n0)}^2}{${tex(n0 - 1)}}+\\frac{${texFactor(v1 / n1)}^2}{${tex(n1 - 1)}}}`,
       value: df,
       source: 'Welch 1947, Biometrika 34:28',
     };

@@ -1,5 +1,6 @@
 import { exponentialRemainder } from '../numeric/remainders.js';
 import { millsRatio } from './mills-ratio.js';
+import { isSharp, sharpNoncentrality, sharpUpper } from './noncentral-t-limit.js';
 import { normalDensity, normalUpper, normalUpperQuantile } from './normal.js';
 import { stirlingError } from './stirling.js';
 
@@ -37,6 +38,7 @@ export function noncentralTUpper(x: number, df: number, ncp: number): number {
   if (df === Infinity || x === 0) return normalUpper(x - ncp);
   if (Math.abs(x) === Infinity) return x < 0 ? 1 : 0;
   if (Math.abs(ncp) > farAway * Math.max(1, Math.abs(x))) return ncp > 0 ? 1 : 0;
+  if (isSharp(ncp, df)) return sharpUpper(x, df, ncp);
   return Math.min(1, upperTail(x, df, ncp).tail);
 }
 
@@ -105,6 +107,11 @@ export function noncentralityFor(power: number, x: number, df: number): number {
   if (!(df > 0 && power >= 0 && power <= 1) || !Number.isFinite(x)) return Number.NaN;
   if (power === 0) return -Infinity;
   if (power === 1) return Infinity;
+  if (df < Infinity && isSharp(x, df)) {
+    return x > 0
+      ? sharpNoncentrality(power, x, df, (ncp) => noncentralTUpper(x, df, ncp))
+      : -noncentralityFor(1 - power, -x, df);
+  }
   if (power > 0.5) return -noncentralityBelow(1 - power, -x, df);
   return noncentralityBelow(power, x, df);
 }

@@ -26,7 +26,7 @@ export function repeatedMeasuresFactor(repeated: NonNullable<ContinuousOutcome['
  * A mean difference, with a common or unequal SD, or adjusted for baselines.
  *
  * Units: the outcome's own. Source: Julious 2004, Stat Med 23:1921; Welch 1947 for unequal SDs.
- * Throws CalcError `schema` when unequal SDs and repeated measurements are combined.
+ * Throws CalcError `unsupported` when unequal SDs and repeated measurements are combined.
  */
 export function continuousModel(outcome: ContinuousOutcome, dilution: number): OutcomeModel {
   const { sd, sdActive, repeated } = outcome;

@@ -16,6 +16,8 @@ export interface OutcomeModel {
   /** Remaining share of the effect after dilution: (1 − contamination)(1 − non-adherence). */
   dilution: number;
   variances: readonly [number, number];
+  /** The proportions of a binary outcome, after dilution. */
+  proportions?: readonly [number, number];
   /** Variance under no difference, where the test uses it rather than the alternative's. */
   nullVariance?(n0: number, n1: number): number;
   /** What a continuity correction takes off |effect|. */

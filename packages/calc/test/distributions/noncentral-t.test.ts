@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { noncentralityFor, noncentralTCdf, noncentralTUpper } from '../../src/distributions/noncentral-t.js';
+import { sharpUpper } from '../../src/distributions/noncentral-t-limit.js';
 import { normalUpper, normalUpperQuantile } from '../../src/distributions/normal.js';
 import { studentTUpper, studentTUpperQuantile } from '../../src/distributions/student-t.js';
 import { runs } from '../arbitrary-requests.js';
@@ -128,5 +129,30 @@ describe('the noncentral t distribution', () => {
       }),
       runs(2000),
     );
+  });
+});
+
+describe('a noncentrality so large that the normal part is sharp', () => {
+  it('gives the limit what the trapezoid rule gives where the two meet', () => {
+    for (const df of [0.5, 1, 2, 5, 30, 200]) {
+      const edge = 199 * Math.sqrt(Math.max(1, df));
+      for (const share of [0.3, 0.8, 0.95, 1, 1.05, 1.3, 3]) {
+        const x = edge / share;
+        expect(Math.abs(noncentralTUpper(x, df, edge) - sharpUpper(x, df, edge))).toBeLessThan(1e-11);
+      }
+    }
+  });
+
+  it('is found again from its power', () => {
+    for (const [power, x, df] of [
+      [0.8, 1e9, 1],
+      [0.8, 3e14, 2],
+      [0.3, 1e4, 1],
+      [0.999, 300, 1],
+      [1e-3, 1e6, 2],
+      [0.8, 5000, 100],
+    ] as const) {
+      expect(noncentralTUpper(x, df, noncentralityFor(power, x, df))).toBeCloseTo(power, 11);
+    }
   });
 });

@@ -1,6 +1,6 @@
 import type { Caution, Step } from '../../appraisal.js';
 import { CalcError } from '../../errors.js';
-import { tex } from '../../explain/tex.js';
+import { tex, texFactor } from '../../explain/tex.js';
 import type { OutcomeModel } from '../../outcomes/outcome-model.js';
 import type { RequestFor } from '../../request.js';
 import { armLabels, groupSizes, minimumBaseUnits, recruitedFor, roundingReach } from '../allocation.js';
@@ -128,7 +128,7 @@ function clusterCautions(
     cautions.push({
       code: 'few-clusters',
       message:
-        'Fewer than 4 clusters in an arm: no permutation of so few can be significant at 5 %, and chance imbalance is large.',
+        'Fewer than 4 clusters in an arm: chance imbalance is large, and with three against three no permutation test can reach 5 %.',
       source: 'Hayes & Moulton 2017',
     });
   }
@@ -174,7 +174,7 @@ function steps(design: ClusterDesign, icc: number, result: WorkedSize, outcome: 
       substituted:
         cv === undefined
           ? `1+(${tex(m)}-1)\\times${tex(icc)}`
-          : `1+\\bigl((1+${tex(cv)}^2)\\times${tex(m)}-1\\bigr)\\times${tex(icc)}`,
+          : `1+\\bigl((1+${texFactor(cv)}^2)\\times${tex(m)}-1\\bigr)\\times${tex(icc)}`,
       value: effect,
       source:
         cv === undefined
@@ -188,12 +188,16 @@ function steps(design: ClusterDesign, icc: number, result: WorkedSize, outcome: 
       value: analysis.contrasts[0]?.standardError as number,
       source: 'Donner, Birkett & Buck 1981',
     },
-    {
-      label: 'Degrees of freedom',
-      formula: '\\nu=k_0+k_1-2',
-      substituted: `${tex(k0)}+${tex(k1)}-2`,
-      value: (k0 + k1 - 2) as number,
-      source: 'Donner & Klar 2000: an analysis of cluster means',
-    },
+    ...(analysis.df === null ? [] : [dfStep(k0, k1, analysis.df)]),
   ];
+}
+
+function dfStep(k0: number, k1: number, df: number): Step {
+  return {
+    label: 'Degrees of freedom',
+    formula: '\\nu=k_0+k_1-2',
+    substituted: `${tex(k0)}+${tex(k1)}-2`,
+    value: df,
+    source: 'Donner & Klar 2000: an analysis of cluster means',
+  };
 }

@@ -1,6 +1,6 @@
 import type { Caution, Step } from '../../appraisal.js';
 import { CalcError } from '../../errors.js';
-import { tex } from '../../explain/tex.js';
+import { tex, texFactor } from '../../explain/tex.js';
 import type { OutcomeModel } from '../../outcomes/outcome-model.js';
 import type { ContinuousOutcome, RequestFor } from '../../request.js';
 import { recruitedFor } from '../allocation.js';
@@ -134,16 +134,20 @@ function steps(
     {
       label: 'Standard error of the effect, within participants',
       formula: '\\mathrm{SE}=\\sigma\\sqrt{\\frac{2(1-\\rho)}{N}}',
-      substituted: `${tex(sd)}\\sqrt{\\frac{2(1-${tex(correlation)})}{${tex(participants)}}}`,
+      substituted: `${tex(sd)}\\sqrt{\\frac{2(1-${texFactor(correlation)})}{${tex(participants)}}}`,
       value: analysis.contrasts[0]?.standardError as number,
       source: 'Senn 2002; Jones & Kenward 2014',
     },
-    {
-      label: 'Degrees of freedom',
-      formula: '\\nu=N-2',
-      substituted: `${tex(participants)}-2`,
-      value: analysis.df as number,
-      source: 'Jones & Kenward 2014: participants, periods and treatment fitted',
-    },
+    ...(analysis.df === null ? [] : [dfStep(participants, analysis.df)]),
   ];
+}
+
+function dfStep(participants: number, df: number): Step {
+  return {
+    label: 'Degrees of freedom',
+    formula: '\\nu=N-2',
+    substituted: `${tex(participants)}-2`,
+    value: df,
+    source: 'Jones & Kenward 2014: participants, periods and treatment fitted',
+  };
 }

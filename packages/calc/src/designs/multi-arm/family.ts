@@ -1,5 +1,4 @@
 import { CalcError } from '../../errors.js';
-import type { OutcomeModel } from '../../outcomes/outcome-model.js';
 import type { Family } from '../family.js';
 import { armSteps, individualArmsPlan } from '../individual-arms.js';
 import { individualPlanningValues } from '../planning-values.js';
@@ -26,8 +25,7 @@ export const multiArm: Family<MultiArmDesign> = {
     return {
       ...individualArmsPlan(request, design.allocation),
       comparisons: design.comparisons,
-      steps: ({ groupUnits, analysis }, outcomes) =>
-        armSteps(request, outcomes[0] as OutcomeModel, groupUnits, analysis),
+      steps: ({ groupUnits, analysis }, outcomes) => armSteps(request, outcomes, groupUnits, analysis),
     };
   },
 };

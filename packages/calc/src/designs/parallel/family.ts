@@ -1,4 +1,3 @@
-import type { OutcomeModel } from '../../outcomes/outcome-model.js';
 import type { Family } from '../family.js';
 import { armSteps, individualArmsPlan } from '../individual-arms.js';
 import { individualPlanningValues } from '../planning-values.js';
@@ -19,8 +18,7 @@ export const parallel: Family<ParallelDesign> = {
     return {
       ...individualArmsPlan(request, allocation),
       equalPair: allocation[0] === allocation[1],
-      steps: ({ groupUnits, analysis }, outcomes) =>
-        armSteps(request, outcomes[0] as OutcomeModel, groupUnits, analysis),
+      steps: ({ groupUnits, analysis }, outcomes) => armSteps(request, outcomes, groupUnits, analysis),
     };
   },
 };

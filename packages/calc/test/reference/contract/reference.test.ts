@@ -5,7 +5,7 @@ import cases from './cases.json' with { type: 'json' };
 import { computed } from './computed.js';
 import costs from './costs.json' with { type: 'json' };
 
-/** Values from an independent implementation in R; see README.md here. */
+/** Values from an independent implementation in R. */
 interface ReferenceCase {
   id: string;
   request: AppraisalRequest;
