@@ -6,6 +6,7 @@ import { APP_FILTER, APP_GUARD, APP_INTERCEPTOR, APP_PIPE } from '@nestjs/core';
 import { CqrsModule } from '@nestjs/cqrs';
 import { ZodSerializerInterceptor } from 'nestjs-zod';
 import { AppraisalsModule } from './appraisals/appraisals.module.js';
+import { AuditModule } from './audit/audit.module.js';
 import { AuthModule } from './auth/auth.module.js';
 import { AuthGuard } from './common/auth.guard.js';
 import { CommonModule } from './common/common.module.js';
@@ -32,6 +33,7 @@ import { StudiesModule } from './studies/studies.module.js';
     CommonModule,
     AuthModule,
     PeopleModule,
+    AuditModule,
     StudiesModule,
     DesignSetsModule,
     AppraisalsModule,

@@ -3,6 +3,7 @@ import type { NestExpressApplication } from '@nestjs/platform-express';
 import compression from 'compression';
 import cookieParser from 'cookie-parser';
 import type { NextFunction, Request, Response } from 'express';
+import { refuseNulInBody, refuseNulInPath } from './no-nul.js';
 import { serveOpenApi } from './open-api.js';
 import { securityHeaders } from './security-headers.js';
 import { appSettings, type Settings } from './settings/settings.js';
@@ -22,8 +23,9 @@ export function configureApp(app: NestExpressApplication, webBuild?: string): vo
     response.set('Cache-Control', 'no-store');
     next();
   });
+  app.use('/api', refuseNulInPath);
   app.use(cookieParser());
-  app.useBodyParser('json');
+  app.useBodyParser('json', { reviver: refuseNulInBody });
   app.setGlobalPrefix('api');
   serveOpenApi(app);
   serveWebBuild(app, webBuild);

@@ -183,7 +183,7 @@ describe('Commands', () => {
 
     test('keep them by treatment', async () => {
       await app.commands.execute(set(investigator));
-      expect(await get('/costs')).toEqual({ version: 1, costs, timeline });
+      expect(await get('/costs')).toEqual({ version: 1, costs, timeline, source: null });
     });
 
     test('refuse figures for more treatments than the study has', async () => {
@@ -216,8 +216,8 @@ describe('Commands', () => {
       const second = await app.commands.execute(add(methodologist));
       const { version, hold, options } = await get('/design-set');
       expect({ version, hold }).toEqual({ version: 3, hold: { kind: 'power', power: 0.9 } });
-      expect(options.map(({ id }: { id: string }) => id)).toEqual([first, second]);
-      expect(options[0]).toEqual({ id: first, version: 1, name, plan });
+      expect(options).toEqual([first, second]);
+      expect(first).toEqual({ id: expect.any(String), version: 1, name, plan, ruling: null });
     });
 
     test('weigh one that lacks a planning value as in error, and say which', async () => {

@@ -2,6 +2,7 @@ import { mkdtemp, readdir, rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { MikroORM } from '@mikro-orm/sqlite';
+import { ormOptions } from '../src/orm-options.js';
 import { Membership } from '../src/studies/membership.entity.js';
 import { Study } from '../src/studies/study.entity.js';
 import { email } from './support/people.js';
@@ -25,7 +26,10 @@ describe('The migrations', () => {
     const migrator = app.nest.get(MikroORM).getMigrator();
     expect(await migrator.checkMigrationNeeded()).toBe(false);
     expect(await migrator.getPendingMigrations()).toEqual([]);
-    expect((await migrator.getExecutedMigrations()).map(({ name }) => name)).toEqual(['20251201-foundation']);
+    expect((await migrator.getExecutedMigrations()).map(({ name }) => name)).toEqual([
+      '20251201-foundation',
+      '20251208-decisions',
+    ]);
   });
 
   test('let the database refuse what breaks a reference', async () => {
@@ -38,6 +42,38 @@ describe('The migrations', () => {
     const statement =
       "insert into membership (id, study_id, person_id, role) values ('m', 'no study', 'no person', 'owner')";
     await expect(app.em.fork().execute(statement)).rejects.toThrow('CHECK constraint failed');
+  });
+});
+
+describe('A database of the version before', () => {
+  test('keeps its planning values, each with what is known of its history', async () => {
+    const orm = await MikroORM.init(ormOptions(':memory:'));
+    const migrator = orm.getMigrator();
+    await migrator.up({ to: '20251201-foundation' });
+    const em = orm.em.fork();
+    await em.execute("insert into person values ('p', 1, 1, 1, 'Ada', 'ada@merrow.example', 'x', 0)");
+    await em.execute(
+      "insert into study values ('s', 1, 1, 1, 'Newfield', 'Merrow', 0, '?', 'Pain', '', '{}', '[]', '{}', null)",
+    );
+    await em.execute(
+      "insert into planning_value values ('v', 3, 1, 77, 's', 'sd', 'every-family', 2.1, null, 2.4, 'Pilot', 'p')",
+    );
+    await migrator.up();
+    const revisions = await em.execute('select * from planning_value_revision');
+    expect(revisions).toEqual([
+      {
+        id: 1,
+        planning_value_id: 'v',
+        version: 3,
+        value: 2.1,
+        low: null,
+        high: 2.4,
+        source: 'Pilot',
+        set_by_id: 'p',
+        set_at: 77,
+      },
+    ]);
+    await orm.close();
   });
 });
 

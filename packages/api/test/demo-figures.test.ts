@@ -1,5 +1,5 @@
-import type { Feasible } from '@steelyard/calc';
-import type { WeighView } from '../src/contract/design-sets.js';
+import type { Feasible, Standing } from '@steelyard/calc';
+import type { DesignSetView, OptionView, WeighView } from '../src/contract/design-sets.js';
 import type { demoPeople } from '../src/demo/people.js';
 import { email } from './support/people.js';
 import { TestApp } from './support/test-app.js';
@@ -10,8 +10,10 @@ interface Figures {
   recruited: number;
   /** Given to three decimals where it is more than the one aimed at. */
   power?: number;
-  euro: number;
-  months: number;
+  /** What it costs and takes is stated of options that may be chosen. */
+  euro?: number;
+  months?: number;
+  ruledOut?: true;
 }
 
 interface Study {
@@ -48,7 +50,7 @@ const studies: Study[] = [
     name: 'Greenkettle',
     methodologist: 'oyelaran',
     aim: 0.8,
-    headline: 'A takes 1,760 girls, 715 k€ and 17 months.',
+    headline: 'No option fits every limit.',
     figures: [
       {
         option: 'Cluster, end only',
@@ -58,13 +60,14 @@ const studies: Study[] = [
         euro: 715_320,
         months: 17,
       },
+      { option: 'Individual randomisation', analysed: [296, 296], recruited: 592, ruledOut: true },
     ],
   },
   {
     name: 'Nimblegrip',
     methodologist: 'aalderink',
     aim: 0.9,
-    headline: 'At power 90 % C costs least, ends first and recruits the fewest participants.',
+    headline: 'A and C fit every limit; C costs least, ends first and recruits the fewest participants.',
     figures: [
       {
         option: 'Four equal arms, no adjustment',
@@ -114,13 +117,16 @@ describe('The demo weighs', () => {
       expect(options.map(({ letter, name, error }) => [letter, name, error])).toEqual(
         figures.map(({ option }, place) => ['ABC'.charAt(place), option, null]),
       );
-      for (const [place, { analysed, recruited, power, euro, months }] of figures.entries()) {
+      for (const [place, { analysed, recruited, power, euro, months, ruledOut }] of figures.entries()) {
         const appraisal = options[place]?.appraisal as unknown as Feasible;
-        const nearest = euro % 1000 === 0 ? 1000 : 1;
         expect(appraisal.groups.map(({ participants }) => participants)).toEqual(analysed);
         expect(appraisal.recruited).toBe(recruited);
-        expect(Math.round((appraisal.costs?.total ?? 0) / nearest) * nearest).toBe(euro);
-        expect(Math.round(appraisal.timeline?.months ?? 0)).toBe(months);
+        expect(options[place]?.ruling?.kind === 'not-admissible').toBe(ruledOut ?? false);
+        if (euro !== undefined) {
+          const nearest = euro % 1000 === 0 ? 1000 : 1;
+          expect(Math.round((appraisal.costs?.total ?? 0) / nearest) * nearest).toBe(euro);
+        }
+        if (months !== undefined) expect(Math.round(appraisal.timeline?.months ?? 0)).toBe(months);
         expect(appraisal.power).toBeGreaterThanOrEqual(aim);
         if (power !== undefined) expect(appraisal.power).toBeCloseTo(power, 3);
       }
@@ -132,6 +138,37 @@ describe('The demo weighs', () => {
     const [study] = (await app.get('/api/studies', cookie)).body.studies;
     const { options } = (await app.get(`/api/studies/${study.id}/weigh`, cookie)).body as WeighView;
     expect(options[0]?.appraisal).toMatchObject({ clusters: 44, clusterSize: 40, measurements: 1760 });
+  });
+
+  test('Greenkettle against its limits: 12 catchments too many, 72.6 % with 60 girls in each of 32', async () => {
+    const cookie = await app.signIn(email('tarvin'));
+    const [study] = (await app.get('/api/studies', cookie)).body.studies;
+    const { verdict, options } = (await app.get(`/api/studies/${study.id}/weigh`, cookie)).body as WeighView;
+    const standing = options[0]?.standing as unknown as Standing;
+    expect(standing.breaches).toEqual([{ limit: 'clusters', allowed: 32, taken: 44, over: 12 }]);
+    expect(standing.within).toMatchObject({ clusters: 32, clusterSize: 60 });
+    expect(standing.within?.power).toBeCloseTo(0.726, 3);
+    expect(verdict.detail).toContain('A needs 12 catchments that do not exist');
+    expect(verdict.detail).toContain('B is ruled out');
+    expect(options[1]?.ruling?.reason).toContain('canteen is shared');
+  });
+
+  test('Greenkettle at sizes as entered: 67.2 % with 40 girls in each of 32 catchments', async () => {
+    const cookie = await app.signIn(email('doss'));
+    const [study] = (await app.get('/api/studies', cookie)).body.studies;
+    const room = (path: string) => `/api/studies/${study.id}${path}`;
+    const { version, options } = (await app.get(room('/design-set'), cookie)).body as DesignSetView;
+    const [cluster] = options as [OptionView];
+    const sized = { version: cluster.version, name: cluster.name, plan: { ...cluster.plan, units: 16 } };
+    await app.request('put', room(`/options/${cluster.id}`), cookie).send(sized);
+    const order = options.map(({ id }) => id);
+    await app
+      .request('put', room('/design-set'), cookie)
+      .send({ version, hold: { kind: 'sizes', power: 0.8 }, order });
+    const weighed = (await app.get(room('/weigh'), cookie)).body as WeighView;
+    const appraisal = weighed.options[0]?.appraisal as unknown as Feasible;
+    expect(appraisal).toMatchObject({ clusters: 32, clusterSize: 40, measurements: 1280 });
+    expect(appraisal.power).toBeCloseTo(0.672, 3);
   });
 
   test('with reals of 12 significant digits, and requests as they were computed', async () => {

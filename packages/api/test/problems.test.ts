@@ -47,6 +47,12 @@ describe('Problems', () => {
     expect(response.body).toMatchObject({ status: 400, code: 'unreadable' });
   });
 
+  test('the character NUL is refused in a body and in a path', async () => {
+    const response = await appraise(JSON.stringify({ outcome: 'a\0b' }));
+    expect(response.body).toMatchObject({ status: 400, code: 'unreadable' });
+    expect((await app.get('/api/studies/a%00b', cookie)).status).toBe(404);
+  });
+
   test('a body beyond the limit is refused', async () => {
     const response = await appraise(JSON.stringify({ padding: 'x'.repeat(200_000) }));
     expect(response.status).toBe(413);

@@ -7,8 +7,10 @@ const open = [
   'GET /api/docs',
   'GET /api/health',
   'GET /api/openapi.json',
+  'GET /api/welcome/:token',
   'POST /api/first-visit',
   'POST /api/session',
+  'POST /api/welcome/:token',
 ];
 
 const isOpen = (route: string) => open.includes(route) || route.startsWith('GET /api/docs/');
@@ -56,9 +58,9 @@ describe('Every route', () => {
         .toSorted(),
     ).toEqual(open.toSorted());
     for (const route of open) {
-      const { status } = await ask(route);
+      const { status, body } = await ask(route);
       expect([route, status]).not.toEqual([route, 401]);
-      expect([route, status]).not.toEqual([route, 404]);
+      expect([route, body.detail]).not.toEqual([route, 'There is nothing at this address.']);
     }
   });
 });

@@ -1,4 +1,3 @@
-import { createHash, randomBytes } from 'node:crypto';
 import { EntityManager } from '@mikro-orm/sqlite';
 import { Injectable } from '@nestjs/common';
 import { Clock } from '../common/clock.js';
@@ -6,6 +5,7 @@ import type { PersonView } from '../contract/access.js';
 import type { Person } from '../people/person.entity.js';
 import { personView } from '../people/person.view.js';
 import { Session } from './session.entity.js';
+import { digestOf, newToken } from './token.js';
 
 const minute = 60_000;
 const day = 24 * 60 * minute;
@@ -28,10 +28,10 @@ export class Sessions {
 
   /** Opens a session in the unit of work of the caller, who flushes it. */
   start(em: EntityManager, person: Person): StartedSession {
-    const token = randomBytes(32).toString('base64url');
+    const token = newToken();
     const now = this.clock.now();
     const expiresAt = new Date(now.getTime() + longest);
-    em.create(Session, { id: digest(token), person, createdAt: now, lastSeenAt: now, expiresAt });
+    em.create(Session, { id: digestOf(token), person, createdAt: now, lastSeenAt: now, expiresAt });
     return { token, expiresAt, person: personView(person) };
   }
 
@@ -41,7 +41,7 @@ export class Sessions {
     const session = await em.findOne(
       Session,
       {
-        id: digest(token),
+        id: digestOf(token),
         expiresAt: { $gt: now },
         lastSeenAt: { $gt: new Date(now.getTime() - longestIdle) },
       },
@@ -55,7 +55,12 @@ export class Sessions {
   }
 
   async end(token: string): Promise<void> {
-    await this.em.fork().nativeDelete(Session, { id: digest(token) });
+    await this.em.fork().nativeDelete(Session, { id: digestOf(token) });
+  }
+
+  /** Ends every session of a person in the unit of work of the caller; with `but` all except that one. */
+  async endAll(em: EntityManager, personId: string, but?: string): Promise<void> {
+    await em.nativeDelete(Session, { person: personId, ...(but && { id: { $ne: digestOf(but) } }) });
   }
 
   async forgetExpired(em: EntityManager): Promise<void> {
@@ -66,5 +71,3 @@ export class Sessions {
     });
   }
 }
-
-const digest = (token: string) => createHash('sha256').update(token).digest('hex');

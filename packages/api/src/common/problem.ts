@@ -11,7 +11,7 @@ const statuses: Record<ProblemCode, number> = {
   internal: 500,
 };
 
-type Extra = Partial<Pick<Problem, 'status' | 'issues' | 'retryAfterSeconds'>>;
+type Extra = Partial<Pick<Problem, 'status' | 'issues' | 'current' | 'retryAfterSeconds'>>;
 
 /** A refusal that people are told about, in the words of `detail`. */
 export class ProblemError extends Error {
@@ -34,6 +34,7 @@ export const invalid = (issues: { path: string; message: string }[]) =>
 
 export const signedOut = (detail = 'Sign in to continue.') => new ProblemError('signed-out', detail);
 
-export const stale = () => new ProblemError('stale', 'Someone else has changed this in the meantime.');
+export const stale = (current?: unknown) =>
+  new ProblemError('stale', 'Someone else has changed this in the meantime.', { current });
 
 export const forbidden = (detail: string) => new ProblemError('forbidden', detail);

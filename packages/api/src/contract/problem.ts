@@ -19,6 +19,8 @@ export const problemSchema = z.object({
   code: z.enum(problemCodes),
   detail: z.string().optional(),
   issues: z.array(z.object({ path: z.string(), message: z.string() })).optional(),
+  /** With `stale`: what is there now, as its own route answers; null where there is nothing any more. */
+  current: z.unknown().optional(),
   correlationId: z.string().optional(),
   retryAfterSeconds: z.number().int().optional(),
 });

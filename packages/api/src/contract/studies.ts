@@ -1,15 +1,11 @@
 import { ledgerEntrySchema, questionPlanSchema, studyCostsSchema } from '@steelyard/calc';
 import { z } from 'zod';
 import { personSchema } from './access.js';
+import { nounSchema, treatmentSchema } from './nouns.js';
+import { basisSchema, estimandSchema } from './question.js';
 
 export const studyRoles = ['methodologist', 'investigator', 'funder', 'reader'] as const;
 export type StudyRole = (typeof studyRoles)[number];
-
-const word = z.string().trim().min(1, 'Enter a word.').max(100);
-
-export const nounSchema = z.object({ one: word, many: word });
-
-export const treatmentSchema = z.object({ name: z.string().trim().min(1, 'Name the treatment.').max(200) });
 
 export const studySummarySchema = z.object({
   id: z.uuid(),
@@ -21,6 +17,8 @@ export const studySummarySchema = z.object({
   /** Funders see submitted editions only; while there is none they cannot open the study. */
   mayOpen: z.boolean(),
   options: z.number().int(),
+  /** The option settled on, once there is one. */
+  choice: z.object({ letter: z.string(), name: z.string() }).nullable(),
   changedAt: z.iso.datetime(),
 });
 
@@ -42,6 +40,9 @@ export const studySchema = z.object({
   /** The outcome's unit as shown behind a number, such as “g/L”; empty where it has none. */
   outcomeUnit: z.string(),
   plan: questionPlanSchema,
+  /** Null until the team has said it. */
+  basis: basisSchema.nullable(),
+  estimand: estimandSchema.nullable(),
   treatments: z.array(treatmentSchema),
   participants: nounSchema,
   clusters: nounSchema.nullable(),
@@ -62,10 +63,13 @@ export const planningValueSchema = ledgerEntrySchema.extend({
 
 export const ledgerSchema = z.object({ values: z.array(planningValueSchema) });
 
-export const costPlanViewSchema = studyCostsSchema.extend({ version: z.number().int() });
+export const costPlanViewSchema = studyCostsSchema.extend({
+  version: z.number().int(),
+  /** Where the figures come from; null where nobody has said. */
+  source: z.string().nullable(),
+});
 
-export type Noun = z.infer<typeof nounSchema>;
-export type Treatment = z.infer<typeof treatmentSchema>;
+export type { Noun, Treatment } from './nouns.js';
 export type StudiesView = z.infer<typeof studiesSchema>;
 export type StudySummary = z.infer<typeof studySummarySchema>;
 export type StudyView = z.infer<typeof studySchema>;

@@ -4,11 +4,13 @@ import { CommandBus } from '@nestjs/cqrs';
 import { Clock } from '../common/clock.js';
 import { AddOption } from '../design-sets/commands/add-option.command.js';
 import { CreateDesignSet } from '../design-sets/commands/create-design-set.command.js';
+import { RuleOnOption } from '../design-sets/commands/rule-on-option.command.js';
 import { entities } from '../orm-options.js';
 import { CreatePerson } from '../people/commands/create-person.command.js';
 import { Person } from '../people/person.entity.js';
 import { CreateStudy } from '../studies/commands/create-study.command.js';
 import { SetCostPlan } from '../studies/commands/set-cost-plan.command.js';
+import { SetLimits } from '../studies/commands/set-limits.command.js';
 import { SetPlanningValue } from '../studies/commands/set-planning-value.command.js';
 import type { DemoStudy } from './demo-study.js';
 import { greenkettle } from './greenkettle.js';
@@ -66,7 +68,7 @@ export class DemoSeeder {
     const idOf = (key: DemoPersonKey) => people.get(key) as string;
     const at = <T>(daysAgo: number, work: () => Promise<T>) =>
       this.clock.asOf(daysBefore(now, daysAgo), work);
-    const { study, team, planningValues, costPlan, hold, options } = demo;
+    const { study, team, planningValues, costPlan, limits, hold, options } = demo;
     const methodologist = idOf(team.methodologist);
     const investigator = idOf(team.investigator);
     const members = (['investigator', 'funder', 'reader'] as const).map((role) => ({
@@ -86,11 +88,21 @@ export class DemoSeeder {
     await at(costsDaysAgo, () =>
       this.commands.execute(new SetCostPlan(studyId, investigator, { ...costs, version: null })),
     );
+    if (limits) {
+      const command = new SetLimits(studyId, investigator, { limits: limits.limits, version: null });
+      await at(limits.daysAgo, () => this.commands.execute(command));
+    }
     await at(startedDaysAgo, () =>
       this.commands.execute(new CreateDesignSet(studyId, methodologist, { hold })),
     );
-    for (const { daysAgo, ...option } of options) {
-      await at(daysAgo, () => this.commands.execute(new AddOption(studyId, investigator, option)));
+    for (const { daysAgo, ruling, ...option } of options) {
+      const { id, version } = await at(daysAgo, () =>
+        this.commands.execute(new AddOption(studyId, investigator, option)),
+      );
+      if (!ruling) continue;
+      const { daysAgo: ruledDaysAgo, ...given } = ruling;
+      const command = new RuleOnOption(studyId, methodologist, id, { ...given, version });
+      await at(ruledDaysAgo, () => this.commands.execute(command));
     }
   }
 

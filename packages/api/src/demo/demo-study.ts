@@ -1,9 +1,9 @@
-import type { Hold, StudyCosts } from '@steelyard/calc';
+import type { Hold, Limits, Ruling, StudyCosts } from '@steelyard/calc';
 import type { z } from 'zod';
+import type { newOptionSchema } from '../contract/options.js';
+import type { newPlanningValueSchema } from '../contract/planning-values.js';
 import type { StudyRole } from '../contract/studies.js';
-import type { newOptionSchema } from '../design-sets/commands/add-option.command.js';
 import type { newStudySchema } from '../studies/commands/create-study.command.js';
-import type { newPlanningValueSchema } from '../studies/commands/set-planning-value.command.js';
 import type { DemoPersonKey } from './people.js';
 
 /** Something that was done some days before the seeding. */
@@ -16,5 +16,7 @@ export interface DemoStudy {
   planningValues: Dated<Omit<z.input<typeof newPlanningValueSchema>, 'version'>>[];
   costPlan: Dated<StudyCosts>;
   hold: Hold;
-  options: Dated<z.input<typeof newOptionSchema>>[];
+  limits?: Dated<{ limits: Limits }>;
+  /** Those ruled on, by the methodologist. */
+  options: Dated<z.input<typeof newOptionSchema> & { ruling?: Dated<Ruling> }>[];
 }

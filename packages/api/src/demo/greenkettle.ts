@@ -59,6 +59,10 @@ export const greenkettle: DemoStudy = {
     timeline: { startUp: 8, accrualPerClusterPerMonth: 40, followUp: 4, period: 4, closeOut: 4 },
     daysAgo: 33.1,
   },
+  limits: {
+    limits: { clusters: 32, participantsPerCluster: 60, money: 800_000, months: 30 },
+    daysAgo: 32.6,
+  },
   hold: { kind: 'power', power: 0.8 },
   options: [
     {
@@ -71,6 +75,17 @@ export const greenkettle: DemoStudy = {
         overrides: {},
       },
       daysAgo: 9.3,
+    },
+    {
+      name: 'Individual randomisation',
+      plan: { family: 'parallel', treatments: [0, 1], structure: {}, overrides: {} },
+      daysAgo: 9.1,
+      ruling: {
+        kind: 'not-admissible',
+        reason:
+          'The canteen is shared: girls in the control arm would eat the iron-rich meals too, and the difference looked for would vanish.',
+        daysAgo: 7.4,
+      },
     },
   ],
 };

@@ -68,6 +68,7 @@ export const nimblegrip: DemoStudy = {
     timeline: { startUp: 6, accrualPerMonth: 21.6, followUp: 6, closeOut: 5 },
     daysAgo: 35.4,
   },
+  limits: { limits: { money: 690_000, months: 49 }, daysAgo: 34.8 },
   hold: { kind: 'power', power: 0.9 },
   options: [
     {

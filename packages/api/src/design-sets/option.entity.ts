@@ -1,6 +1,7 @@
 import { defineEntity, type InferEntity, p } from '@mikro-orm/sqlite';
-import type { OptionPlan } from '@steelyard/calc';
+import type { OptionPlan, Ruling } from '@steelyard/calc';
 import { aggregateProperties } from '../common/base.entity.js';
+import { Person } from '../people/person.entity.js';
 import { DesignSet } from './design-set.entity.js';
 
 /** One candidate design. */
@@ -11,6 +12,10 @@ export const Option = defineEntity({
     designSet: () => p.manyToOne(DesignSet),
     name: p.string(),
     plan: p.json<OptionPlan>(),
+    ruling: p.json<Ruling>().nullable(),
+    ruledBy: () => p.manyToOne(Person).nullable(),
+    ruledAt: p.datetime().nullable(),
+    removedAt: p.datetime().nullable(),
   },
 });
 

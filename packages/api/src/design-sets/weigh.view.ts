@@ -14,6 +14,8 @@ const weighedOptionView = ({
   request,
   appraisal,
   error,
+  standing,
+  ruling,
 }: WeighedOption): WeighedOptionView => ({
   optionId: id,
   letter,
@@ -21,4 +23,6 @@ const weighedOptionView = ({
   request: { ...request },
   appraisal: appraisal && { ...roundedReals(appraisal) },
   error,
+  standing: standing && { ...roundedReals(standing) },
+  ruling,
 });

@@ -12,6 +12,8 @@ export const CostPlan = defineEntity({
     study: () => p.oneToOne(Study),
     costs: p.json<Costs>(),
     timeline: p.json<TimelinePlan>(),
+    /** Where the figures come from; null where nobody has said. */
+    source: p.text().nullable(),
     setBy: () => p.manyToOne(Person),
   },
 });

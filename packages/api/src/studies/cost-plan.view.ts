@@ -1,8 +1,9 @@
 import type { CostPlanView } from '../contract/studies.js';
 import type { CostPlan } from './cost-plan.entity.js';
 
-export const costPlanView = ({ version, costs, timeline }: CostPlan): CostPlanView => ({
+export const costPlanView = ({ version, costs, timeline, source }: CostPlan): CostPlanView => ({
   version,
   costs,
   timeline,
+  source: source ?? null,
 });

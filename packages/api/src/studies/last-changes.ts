@@ -7,6 +7,7 @@ export async function lastChanges(em: EntityManager, studyIds: string[]): Promis
        select id as study, changed_at from study
        union all select study_id, changed_at from planning_value
        union all select study_id, changed_at from cost_plan
+       union all select study_id, changed_at from limits
        union all select study_id, changed_at from design_set
        union all select design_set.study_id, option.changed_at
          from option join design_set on design_set.id = option.design_set_id

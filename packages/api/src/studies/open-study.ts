@@ -12,7 +12,7 @@ export async function openStudy(
   const membership = await em.findOne(
     Membership,
     { study: studyId, person: personId },
-    { populate: ['study'] },
+    { populate: ['study', 'person'] },
   );
   if (!membership || !may(membership.role, 'see the draft')) throw notFound('There is no such study.');
   if (!may(membership.role, action)) throw forbidden(`A ${membership.role} may not ${action} here.`);

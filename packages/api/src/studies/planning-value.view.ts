@@ -1,6 +1,8 @@
 import { type LedgerEntry, planningValueKeys } from '@steelyard/calc';
+import type { PlanningValueRevisionView } from '../contract/planning-values.js';
 import type { LedgerView, PlanningValueView } from '../contract/studies.js';
 import type { PlanningValue } from './planning-value.entity.js';
+import type { PlanningValueRevision } from './planning-value-revision.entity.js';
 
 /** The ledger in the order in which planning values are listed; one for every family before those for one. */
 export const ledgerView = (values: PlanningValue[]): LedgerView => ({
@@ -13,7 +15,7 @@ export const ledgerEntryOf = ({ key, scope, value }: PlanningValue): LedgerEntry
   value,
 });
 
-function planningValueView(planningValue: PlanningValue): PlanningValueView {
+export function planningValueView(planningValue: PlanningValue): PlanningValueView {
   const { id, version, low, high, source, setBy, changedAt } = planningValue;
   return {
     id,
@@ -26,6 +28,24 @@ function planningValueView(planningValue: PlanningValue): PlanningValueView {
     setAt: changedAt.toISOString(),
   };
 }
+
+export const planningValueRevisionView = ({
+  version,
+  value,
+  low,
+  high,
+  source,
+  setBy,
+  setAt,
+}: PlanningValueRevision): PlanningValueRevisionView => ({
+  version,
+  value,
+  low: low ?? null,
+  high: high ?? null,
+  source,
+  setBy: setBy.name,
+  setAt: setAt.toISOString(),
+});
 
 const byKey = (a: PlanningValueView, b: PlanningValueView) =>
   planningValueKeys.indexOf(a.key) - planningValueKeys.indexOf(b.key) ||

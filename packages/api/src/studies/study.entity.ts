@@ -1,7 +1,8 @@
 import { defineEntity, type InferEntity, p } from '@mikro-orm/sqlite';
 import type { QuestionPlan } from '@steelyard/calc';
 import { aggregateProperties } from '../common/base.entity.js';
-import type { Noun, Treatment } from '../contract/studies.js';
+import type { Noun, Treatment } from '../contract/nouns.js';
+import type { Basis, Estimand } from '../contract/question.js';
 
 export const Study = defineEntity({
   name: 'Study',
@@ -18,6 +19,8 @@ export const Study = defineEntity({
     treatments: p.json<Treatment[]>(),
     participants: p.json<Noun>(),
     clusters: p.json<Noun>().nullable(),
+    basis: p.json<Basis>().nullable(),
+    estimand: p.json<Estimand>().nullable(),
   },
 });
 

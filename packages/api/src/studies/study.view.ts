@@ -4,7 +4,7 @@ import { may } from './permissions.js';
 
 export function studySummaryView(
   { study, role }: Membership,
-  { options, changedAt }: { options: number; changedAt: Date },
+  { options, choice, changedAt }: Pick<StudySummary, 'options' | 'choice'> & { changedAt: Date },
 ): StudySummary {
   return {
     id: study.id,
@@ -15,6 +15,7 @@ export function studySummaryView(
     role,
     mayOpen: may(role, 'see the draft'),
     options,
+    choice,
     changedAt: changedAt.toISOString(),
   };
 }
@@ -33,6 +34,8 @@ export function studyView(
     outcomeLabel: study.outcomeLabel,
     outcomeUnit: study.outcomeUnit,
     plan: study.plan,
+    basis: study.basis ?? null,
+    estimand: study.estimand ?? null,
     treatments: study.treatments,
     participants: study.participants,
     clusters: study.clusters ?? null,

@@ -1,27 +1,23 @@
-import { EntityManager } from '@mikro-orm/sqlite';
 import { CommandHandler, type ICommandHandler } from '@nestjs/cqrs';
 import { newAggregate } from '../../common/base.entity.js';
-import { Clock } from '../../common/clock.js';
-import { expectVersion } from '../../common/expect-version.js';
+import { stale } from '../../common/problem.js';
 import { validated } from '../../common/validation.js';
-import { openStudy } from '../../studies/open-study.js';
+import { newDesignSetSchema } from '../../contract/options.js';
+import { StudyChanges } from '../../studies/study-changes.js';
 import { DesignSet } from '../design-set.entity.js';
-import { CreateDesignSet, newDesignSetSchema } from './create-design-set.command.js';
+import { CreateDesignSet } from './create-design-set.command.js';
 
 @CommandHandler(CreateDesignSet)
 export class CreateDesignSetHandler implements ICommandHandler<CreateDesignSet> {
-  constructor(
-    private readonly em: EntityManager,
-    private readonly clock: Clock,
-  ) {}
+  constructor(private readonly changes: StudyChanges) {}
 
   async execute(command: CreateDesignSet): Promise<string> {
     const { hold } = validated(newDesignSetSchema, command.designSet);
-    const em = this.em.fork();
-    const { study } = await openStudy(em, command, 'edit options');
-    expectVersion(await em.findOne(DesignSet, { study }), null);
-    const designSet = em.create(DesignSet, { ...newAggregate(this.clock.now()), study, hold, optionIds: [] });
-    await em.flush();
-    return designSet.id;
+    return this.changes.make(command, 'edit options', async ({ em, study, now, record }) => {
+      if ((await em.count(DesignSet, { study })) > 0) throw stale();
+      record({ action: 'created', what: 'the design set', after: { hold } });
+      const designSet = em.create(DesignSet, { ...newAggregate(now), study, hold, optionIds: [] });
+      return designSet.id;
+    });
   }
 }

@@ -13,7 +13,6 @@ export class WhichOptionsHandler implements IQueryHandler<WhichOptions> {
   async execute(query: WhichOptions): Promise<DesignSetView> {
     const em = this.em.fork();
     const { study } = await openStudy(em, query);
-    const { designSet, options } = await loadDesignSet(em, study);
-    return designSetView(designSet, options);
+    return designSetView(await loadDesignSet(em, study));
   }
 }

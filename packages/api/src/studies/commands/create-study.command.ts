@@ -1,7 +1,8 @@
 import { Command } from '@nestjs/cqrs';
 import { questionPlanSchema } from '@steelyard/calc';
 import { z } from 'zod';
-import { nounSchema, studyRoles, treatmentSchema } from '../../contract/studies.js';
+import { nounSchema, treatmentSchema } from '../../contract/nouns.js';
+import { studyRoles } from '../../contract/studies.js';
 
 const line = z.string().trim().min(1).max(200);
 

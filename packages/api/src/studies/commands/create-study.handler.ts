@@ -1,5 +1,6 @@
 import { EntityManager } from '@mikro-orm/sqlite';
 import { CommandHandler, type ICommandHandler } from '@nestjs/cqrs';
+import { recordAudit } from '../../audit/record-audit.js';
 import { newAggregate } from '../../common/base.entity.js';
 import { Clock } from '../../common/clock.js';
 import { invalid } from '../../common/problem.js';
@@ -27,8 +28,11 @@ export class CreateStudyHandler implements ICommandHandler<CreateStudy> {
     if ((await em.count(Person, { id: { $in: [...ids] } })) < ids.size) {
       throw invalid([{ path: 'members', message: 'A member is a person who has an account.' }]);
     }
-    const study = em.create(Study, { ...newAggregate(this.clock.now()), ...properties });
+    const now = this.clock.now();
+    const study = em.create(Study, { ...newAggregate(now), ...properties });
     for (const part of parts) em.create(Membership, { study, person: part.personId, role: part.role });
+    const by = em.getReference(Person, personId);
+    recordAudit(em, { action: 'created', what: 'the study', after: properties }, { at: now, by, study });
     await em.flush();
     return study.id;
   }

@@ -1,18 +1,12 @@
 import { Command } from '@nestjs/cqrs';
-import { studyCostsSchema } from '@steelyard/calc';
-import { z } from 'zod';
+import type { NewCostPlan } from '../../contract/costs.js';
+import type { CostPlanView } from '../../contract/studies.js';
 
-export const newCostPlanSchema = studyCostsSchema.extend({
-  /** The version it replaces; null where there was none. */
-  version: z.number().int().nullable(),
-});
-
-/** Answers with the cost plan's id. */
-export class SetCostPlan extends Command<string> {
+export class SetCostPlan extends Command<CostPlanView> {
   constructor(
     readonly studyId: string,
     readonly personId: string,
-    readonly costPlan: z.input<typeof newCostPlanSchema>,
+    readonly costPlan: NewCostPlan,
   ) {
     super();
   }
