@@ -30,6 +30,8 @@ export default defineConfig({
     // One set of modules for all files: each brings the server and the preferences back to their start.
     isolate: false,
     setupFiles: ['test/setup.ts'],
+    // The first page of a file brings the whole interface with it, on a busy machine in seconds.
+    testTimeout: 20_000,
     reporters: ['default', ['json', { outputFile: 'reports/vitest.json' }]],
   },
 });

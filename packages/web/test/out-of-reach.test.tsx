@@ -6,8 +6,7 @@ import { weighingOf } from '../src/features/weigh/model/weighing';
 import { greenkettle } from './fixtures/greenkettle';
 
 it('An option that cannot reach the power says so, with the power it is limited to and what would do', () => {
-  const { study, ledger, costs, designSet } = greenkettle();
-  const [option] = weighingOf(study, ledger, costs, designSet).options;
+  const [option] = weighingOf({ ...greenkettle(), draftOf: () => undefined }).options;
   if (!option) throw new Error('no option');
   const infeasible = {
     code: 'clusters',

@@ -27,13 +27,14 @@ export function problem(status: number, code: Problem['code'], more: Partial<Pro
   );
 }
 
-/** Someone is signed in and the study is there, in its four parts. */
-export function serve({ study, ledger, costs, designSet }: StudyFixture): void {
+/** Someone is signed in and the study is there, in its five parts. */
+export function serve({ study, ledger, costs, designSet, limits }: StudyFixture): void {
   server.use(
     answer.session(),
     http.get(`*/api/studies/${study.id}`, () => HttpResponse.json(study)),
     http.get(`*/api/studies/${study.id}/planning-values`, () => HttpResponse.json({ values: ledger })),
     http.get(`*/api/studies/${study.id}/costs`, () => HttpResponse.json(costs)),
+    http.get(`*/api/studies/${study.id}/limits`, () => HttpResponse.json(limits)),
     http.get(`*/api/studies/${study.id}/design-set`, () => HttpResponse.json(designSet)),
   );
 }

@@ -1,6 +1,7 @@
 import '@testing-library/jest-dom/vitest';
-import { cleanup } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import { afterAll, afterEach, beforeAll, beforeEach, vi } from 'vitest';
+import { useDrafts } from '../src/features/designs/model/drafts';
 import { usePreferences } from '../src/shared/preferences';
 import { server } from './server';
 import { surroundings } from './surroundings';
@@ -14,6 +15,9 @@ HTMLDialogElement.prototype.close = function close() {
   this.dispatchEvent(new Event('close'));
 };
 
+// A page's script is fetched the first time it is opened, which a busy machine may take its time over.
+configure({ asyncUtilTimeout: 4000 });
+
 beforeAll(() => server.listen({ onUnhandledRequest: 'error' }));
 beforeEach(() => {
   surroundings.matching = [];
@@ -24,7 +28,9 @@ afterEach(() => {
   cleanup();
   server.resetHandlers();
   localStorage.clear();
+  sessionStorage.clear();
   usePreferences.setState(usePreferences.getInitialState());
+  useDrafts.setState({ drafts: {} });
   document.title = '';
 });
 afterAll(() => server.close());

@@ -13,6 +13,7 @@ const summary = {
   role: 'methodologist',
   mayOpen: true,
   options: 3,
+  choice: null,
   changedAt: new Date(Date.now() - 49 * 3600 * 1000).toISOString(),
 };
 
@@ -37,6 +38,12 @@ describe('Studies', () => {
     const changed = within(item).getByRole('button', { name: '2 days ago' });
     expect(changed).toHaveAccessibleDescription(/\d{1,2} \w+ \d{4} at \d\d:\d\d/);
     expect(document.title).toBe('Studies · Steelyard');
+  });
+
+  it('says which option was chosen', async () => {
+    server.use(answer.session(), answer.studies({ ...summary, choice: { letter: 'C', name: 'Crossover' } }));
+    openApp('/');
+    expect(await screen.findByText('Chosen: C, Crossover')).toBeVisible();
   });
 
   it('tells a funder that nothing has been submitted, and leads nowhere', async () => {

@@ -22,7 +22,7 @@ const row = (name: RegExp) =>
   within(screen.getByRole('table', { name: 'Options' })).getByRole('row', { name });
 const choice = (name: RegExp) => within(row(name)).getByRole('button');
 const panel = () => screen.getByRole('region', { name: /^Option [A-Z]+$/ });
-const fact = (name: string) => within(panel()).getByText(name).nextElementSibling;
+const fact = (name: string) => within(panel()).getByText(name, { selector: 'dt' }).nextElementSibling;
 
 describe('Weigh', () => {
   it('asks the question and says what it is planned on', async () => {
@@ -90,7 +90,9 @@ describe('Weigh', () => {
     await user.tab();
     const chip = screen.getByRole('button', { name: /^Power 90\s%$/ });
     expect(chip).toHaveFocus();
-    expect(chip).toHaveAccessibleDescription('Each option takes the fewest units that reach this power.');
+    await waitFor(() =>
+      expect(chip).toHaveAccessibleDescription('Power: each option takes the fewest units that reach it.'),
+    );
   });
 
   it('moves between options with the arrow keys and chooses with Enter', async () => {
@@ -131,6 +133,7 @@ describe('Weigh', () => {
 
   it('shows what the option takes from the ledger, its own family’s line first', async () => {
     const fixture = stillfoot();
+    fixture.study.role = 'reader';
     await openWeigh(fixture, `?option=${fixture.designSet.options[2]?.id}`);
     expect(fact('Attrition, crossover')).toHaveTextContent('20 %');
     expect(fact('Within-person correlation')).toHaveTextContent('0.6');
@@ -140,6 +143,7 @@ describe('Weigh', () => {
 
   it('shows an override beside the ledger’s value, with its reason', async () => {
     const fixture = stillfoot();
+    fixture.study.role = 'reader';
     const [first] = fixture.designSet.options;
     if (first) first.plan.overrides = { sd: { value: 2.6, reason: 'These sites vary more.' } };
     await openWeigh(fixture);
@@ -205,7 +209,7 @@ describe('Weigh', () => {
     expect(screen.queryByRole('table')).not.toBeInTheDocument();
   });
 
-  it('shows a skeleton until all four parts are there', async () => {
+  it('shows a skeleton until all parts are there', async () => {
     const fixture = stillfoot();
     serve(fixture);
     let release = () => {};

@@ -99,12 +99,13 @@ describe('The working of an option', () => {
     openWorking(stillfoot(), 1);
     const list = await screen.findByRole('navigation', { name: 'Study' });
     const links = await within(list).findAllByRole('link');
-    expect(links.map((link) => link.textContent)).toEqual([
+    const at = links.findIndex((link) => link.textContent === 'Weigh');
+    expect(links.slice(at, at + 4).map((link) => link.textContent)).toEqual([
       'Weigh',
       'AParallel, unadjusted',
       'BParallel, baseline-adjusted',
       'CCrossover',
     ]);
-    expect(links[2]).toHaveAttribute('aria-current', 'page');
+    expect(links[at + 2]).toHaveAttribute('aria-current', 'page');
   });
 });

@@ -2,8 +2,16 @@ export const paths = {
   studies: '/',
   signIn: '/sign-in',
   welcome: (code: string) => `/welcome/${encodeURIComponent(code)}`,
+  question: (studyId: string) => `/studies/${studyId}/question`,
+  ledger: (studyId: string) => `/studies/${studyId}/ledger`,
+  costs: (studyId: string) => `/studies/${studyId}/costs`,
+  newStudy: '/studies/new',
   weigh: (studyId: string, optionId?: string) =>
     `/studies/${studyId}/weigh${optionId ? `?option=${optionId}` : ''}`,
+  members: (studyId: string) => `/studies/${studyId}/members`,
+  history: (studyId: string) => `/studies/${studyId}/history`,
+  profile: '/profile',
+  admin: '/admin',
   working: (studyId: string, optionId: string) => `/studies/${studyId}/options/${optionId}`,
 };
 

@@ -1,12 +1,19 @@
-import { QueryCache, QueryClient } from '@tanstack/react-query';
+import { MutationCache, QueryCache, QueryClient } from '@tanstack/react-query';
 import { ApiError } from '../shared/api/client';
 
-/** Queries of this application; `onSignedOut` hears of any that finds the session ended. */
+/** Queries and changes of this application; `onSignedOut` hears of any that finds the session ended. */
 export function createQueryClient(onSignedOut: () => void): QueryClient {
-  return new QueryClient({
+  const queryClient = new QueryClient({
     queryCache: new QueryCache({
       onError: (error) => {
-        if (error instanceof ApiError && error.status === 401) onSignedOut();
+        if (statusOf(error) === 401) onSignedOut();
+      },
+    }),
+    mutationCache: new MutationCache({
+      onError: (error) => {
+        if (statusOf(error) === 401) onSignedOut();
+        // What was to be changed is gone, or no longer open to this person: the page must learn of it too.
+        if (statusOf(error) === 404) void queryClient.invalidateQueries({ queryKey: ['studies'] });
       },
     }),
     defaultOptions: {
@@ -17,7 +24,10 @@ export function createQueryClient(onSignedOut: () => void): QueryClient {
       },
     },
   });
+  return queryClient;
 }
+
+const statusOf = (error: Error) => (error instanceof ApiError ? error.status : undefined);
 
 /** A server that is starting or out of reach may answer the second time; a refusal stays one. */
 function mayPass(error: Error): boolean {

@@ -2,6 +2,7 @@ import type { QueryClient } from '@tanstack/react-query';
 import { type LoaderFunctionArgs, type RouteObject, redirect } from 'react-router-dom';
 import { accessQuery, sessionQuery } from '../features/access/api/access';
 import { designSetQuery } from '../features/designs/api/design-set';
+import { profileQuery } from '../features/profile/api/profile';
 import { costsQuery, ledgerQuery, studiesQuery, studyQuery } from '../features/studies/api/studies';
 import { paths, signInPath } from './paths';
 import { ErrorPage } from './routes/error-page';
@@ -19,6 +20,10 @@ export function createRoutes(queryClient: QueryClient): RouteObject[] {
   };
   const studies = () => {
     void queryClient.prefetchQuery(studiesQuery());
+    return null;
+  };
+  const profile = () => {
+    void queryClient.prefetchQuery(profileQuery());
     return null;
   };
   const study = ({ params: { studyId = '' } }: LoaderFunctionArgs) => {
@@ -55,20 +60,53 @@ export function createRoutes(queryClient: QueryClient): RouteObject[] {
               lazy: { Component: async () => (await import('./routes/studies-page')).StudiesPage },
             },
             {
+              path: 'studies/new',
+              lazy: { Component: async () => (await import('./routes/new-study-page')).NewStudyPage },
+            },
+            {
               path: 'studies/:studyId',
               loader: study,
               lazy: { Component: async () => (await import('./layout/study-frame')).StudyFrame },
               children: [
                 { index: true, loader: ({ params }) => redirect(paths.weigh(params.studyId as string)) },
                 {
+                  path: 'question',
+                  lazy: { Component: async () => (await import('./routes/question-page')).QuestionPage },
+                },
+                {
+                  path: 'ledger',
+                  lazy: { Component: async () => (await import('./routes/ledger-page')).LedgerPage },
+                },
+                {
+                  path: 'costs',
+                  lazy: { Component: async () => (await import('./routes/costs-page')).CostsPage },
+                },
+                {
                   path: 'weigh',
                   lazy: { Component: async () => (await import('./routes/weigh-page')).WeighPage },
+                },
+                {
+                  path: 'members',
+                  lazy: { Component: async () => (await import('./routes/members-page')).MembersPage },
+                },
+                {
+                  path: 'history',
+                  lazy: { Component: async () => (await import('./routes/history-page')).HistoryPage },
                 },
                 {
                   path: 'options/:optionId',
                   lazy: { Component: async () => (await import('./routes/working-page')).WorkingPage },
                 },
               ],
+            },
+            {
+              path: paths.profile,
+              loader: profile,
+              lazy: { Component: async () => (await import('./routes/profile-page')).ProfilePage },
+            },
+            {
+              path: paths.admin,
+              lazy: { Component: async () => (await import('./routes/admin-page')).AdminPage },
             },
             {
               path: '*',

@@ -1,6 +1,6 @@
 import { makeStyles, tokens } from '@fluentui/react-components';
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
-import { useNavigate } from 'react-router-dom';
+import { Link, useNavigate } from 'react-router-dom';
 import { sessionQuery, signOut } from '../../features/access/api/access';
 import { messageOf } from '../../shared/api/faults';
 import { type ThemeChoice, themeChoices, usePreferences } from '../../shared/preferences';
@@ -43,7 +43,7 @@ export function AccountMenu() {
       trigger={<Initials name={person.name} tone={0} />}
       align="end"
     >
-      {() => (
+      {(close) => (
         <>
           <div className={styles.person}>
             <div className={styles.name}>{person.name}</div>
@@ -65,6 +65,14 @@ export function AccountMenu() {
             ))}
           </fieldset>
           <div className={panel.group}>
+            <Link to={paths.profile} className={panel.item} onClick={close}>
+              Profile
+            </Link>
+            {person.administrator && (
+              <Link to={paths.admin} className={panel.item} onClick={close}>
+                People
+              </Link>
+            )}
             <button type="button" className={panel.item} onClick={() => leave.mutate()}>
               Sign out
             </button>

@@ -2,7 +2,7 @@ import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
 import { Link } from 'react-router-dom';
 import { OptionTag } from '../../shared/ui/option-tag';
 import { ownTokens } from '../../shared/ui/own-tokens';
-import { useStudyPages } from './study-pages';
+import { type StudyPage, useStudyPages } from './study-pages';
 
 const useStyles = makeStyles({
   list: {
@@ -32,6 +32,7 @@ const useStyles = makeStyles({
     fontWeight: 700,
     ':hover': { backgroundColor: ownTokens.brassSoft },
   },
+  about: { marginTop: '10px', paddingTop: '10px', borderTop: `1px solid ${tokens.colorNeutralStroke2}` },
   heading: {
     padding: '12px 10px 4px',
     color: tokens.colorNeutralForeground2,
@@ -47,13 +48,7 @@ export function SideList({ studyId }: { studyId: string }) {
     <nav aria-label="Study" className={styles.list}>
       {pages && (
         <>
-          <Link
-            to={pages.weigh.path}
-            aria-current={pages.weigh.current ? 'page' : undefined}
-            className={mergeClasses(styles.item, pages.weigh.current && styles.here)}
-          >
-            Weigh
-          </Link>
+          <Pages pages={pages.main} />
           {pages.workings.length > 0 && (
             <p id="workings" className={styles.heading}>
               Working
@@ -73,8 +68,25 @@ export function SideList({ studyId }: { studyId: string }) {
               </li>
             ))}
           </ul>
+          <div className={styles.about}>
+            <Pages pages={pages.about} />
+          </div>
         </>
       )}
     </nav>
   );
+}
+
+function Pages({ pages }: { pages: readonly StudyPage[] }) {
+  const styles = useStyles();
+  return pages.map(({ label, path, current }) => (
+    <Link
+      key={path}
+      to={path}
+      aria-current={current ? 'page' : undefined}
+      className={mergeClasses(styles.item, current && styles.here)}
+    >
+      {label}
+    </Link>
+  ));
 }

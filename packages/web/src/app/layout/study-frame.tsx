@@ -1,6 +1,10 @@
 import { makeStyles, tokens } from '@fluentui/react-components';
+import { useQuery } from '@tanstack/react-query';
 import { Outlet, useParams } from 'react-router-dom';
+import { studyQuery } from '../../features/studies/api/studies';
+import { ApiError } from '../../shared/api/client';
 import { MainRegion } from '../../shared/ui/main-region';
+import { ClosedStudy } from './closed-study';
 import { SideList } from './side-list';
 
 const useStyles = makeStyles({
@@ -22,6 +26,14 @@ const useStyles = makeStyles({
 export function StudyFrame() {
   const styles = useStyles();
   const { studyId = '' } = useParams();
+  const { data: study, error } = useQuery(studyQuery(studyId));
+  if (study && error instanceof ApiError && error.status === 404) {
+    return (
+      <MainRegion>
+        <ClosedStudy name={study.name} />
+      </MainRegion>
+    );
+  }
   return (
     <div className={styles.frame}>
       <SideList studyId={studyId} />

@@ -5,10 +5,21 @@ import { designSetQuery } from '../../features/designs/api/design-set';
 import { studyQuery } from '../../features/studies/api/studies';
 import { paths } from '../paths';
 
+export interface StudyPage {
+  label: string;
+  path: string;
+  current: boolean;
+}
+
 export interface StudyPages {
   name: string;
   fictional: boolean;
-  weigh: { path: string; current: boolean };
+  /** Where its name leads. */
+  home: string;
+  /** Where the study is made and weighed. */
+  main: StudyPage[];
+  /** Who is in it and what they did. */
+  about: StudyPage[];
   workings: { id: string; letter: string; position: number; name: string; path: string; current: boolean }[];
 }
 
@@ -19,11 +30,18 @@ export function useStudyPages(studyId: string): StudyPages | undefined {
   const { data: study } = useQuery(studyQuery(studyId));
   const { data: designSet } = useQuery(designSetQuery(studyId));
   if (!study || !designSet) return undefined;
-  const weigh = paths.weigh(studyId);
+  const page = (label: string, path: string): StudyPage => ({ label, path, current: pathname === path });
   return {
     name: study.name,
     fictional: study.fictional,
-    weigh: { path: weigh, current: pathname === weigh },
+    home: paths.weigh(studyId),
+    main: [
+      page('Question', paths.question(studyId)),
+      page('Ledger', paths.ledger(studyId)),
+      page('Costs', paths.costs(studyId)),
+      page('Weigh', paths.weigh(studyId)),
+    ],
+    about: [page('Members', paths.members(studyId)), page('History', paths.history(studyId))],
     workings: designSet.options.map(({ id, name }, position) => ({
       id,
       letter: letterOf(position),

@@ -5,7 +5,7 @@ import { OptionTag } from '../../shared/ui/option-tag';
 import { onBar } from '../../shared/ui/own-tokens';
 import { usePanelStyles } from '../../shared/ui/panel-item';
 import { paths } from '../paths';
-import { type StudyPages, useStudyPages } from './study-pages';
+import { type StudyPage, type StudyPages, useStudyPages } from './study-pages';
 
 const useStyles = makeStyles({
   trail: { minWidth: 0, color: onBar.muted, '@media (max-width: 900px)': { display: 'none' } },
@@ -38,7 +38,8 @@ export function StudyTrail({ studyId }: { studyId: string }) {
   const pages = useStudyPages(studyId);
   if (!pages) return null;
   const working = pages.workings.find(({ current }) => current);
-  const here = working ? `Working of ${working.letter}` : 'Weigh';
+  const page = [...pages.main, ...pages.about].find(({ current }) => current);
+  const here = working ? `Working of ${working.letter}` : (page?.label ?? 'Weigh');
   return (
     <>
       <Trail pages={pages} here={here} />
@@ -64,7 +65,7 @@ function Trail({ pages, here }: Place) {
         </li>
         <li aria-hidden="true">/</li>
         <li className={styles.step}>
-          <Link to={pages.weigh.path} className={styles.link}>
+          <Link to={pages.home} className={styles.link}>
             {pages.name}
           </Link>
         </li>
@@ -98,14 +99,7 @@ function PagesMenu({ pages, here }: Place) {
             Studies
           </Link>
           <div className={panel.group}>
-            <Link
-              to={pages.weigh.path}
-              aria-current={pages.weigh.current ? 'page' : undefined}
-              className={mergeClasses(panel.item, pages.weigh.current && panel.here)}
-              onClick={close}
-            >
-              Weigh
-            </Link>
+            <MenuItems pages={pages.main} onGo={close} />
           </div>
           <div className={panel.group}>
             <p className={panel.heading}>Working</p>
@@ -122,8 +116,26 @@ function PagesMenu({ pages, here }: Place) {
               </Link>
             ))}
           </div>
+          <div className={panel.group}>
+            <MenuItems pages={pages.about} onGo={close} />
+          </div>
         </nav>
       )}
     </Disclosure>
   );
+}
+
+function MenuItems({ pages, onGo }: { pages: readonly StudyPage[]; onGo: () => void }) {
+  const panel = usePanelStyles();
+  return pages.map(({ label, path, current }) => (
+    <Link
+      key={path}
+      to={path}
+      aria-current={current ? 'page' : undefined}
+      className={mergeClasses(panel.item, current && panel.here)}
+      onClick={onGo}
+    >
+      {label}
+    </Link>
+  ));
 }

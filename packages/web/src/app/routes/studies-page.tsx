@@ -1,3 +1,4 @@
+import { makeStyles } from '@fluentui/react-components';
 import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { sessionQuery } from '../../features/access/api/access';
 import { studiesQuery } from '../../features/studies/api/studies';
@@ -6,10 +7,14 @@ import { StudyList, StudyListSkeleton } from '../../features/studies/components/
 import { MainRegion } from '../../shared/ui/main-region';
 import { PageBody } from '../../shared/ui/page-body';
 import { QueryBoundary } from '../../shared/ui/query-boundary';
+import { PrimaryLink } from '../../shared/ui/text-link';
 import { Word } from '../../shared/ui/words';
 import { paths } from '../paths';
 
+const useStyles = makeStyles({ start: { marginBottom: '14px' } });
+
 export function StudiesPage() {
+  const styles = useStyles();
   return (
     <MainRegion>
       <title>Studies · Steelyard</title>
@@ -21,6 +26,9 @@ export function StudiesPage() {
           </>
         }
       >
+        <p className={styles.start}>
+          <PrimaryLink to={paths.newStudy}>New study</PrimaryLink>
+        </p>
         <QueryBoundary what="list of studies" skeleton={<StudyListSkeleton />}>
           <Studies />
         </QueryBoundary>

@@ -38,5 +38,6 @@ async function problemIn(response: Response): Promise<ApiError['problem']> {
 export const api = {
   get: <T>(path: string, signal?: AbortSignal) => send<T>('GET', path, undefined, signal),
   post: <T>(path: string, body: unknown) => send<T>('POST', path, body),
-  delete: (path: string) => send<void>('DELETE', path),
+  put: <T>(path: string, body: unknown) => send<T>('PUT', path, body),
+  delete: <T = void>(path: string, body?: unknown) => send<T>('DELETE', path, body),
 };

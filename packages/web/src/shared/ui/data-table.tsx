@@ -18,6 +18,7 @@ const useStyles = makeStyles({
     ':first-child': { paddingLeft: 0 },
   },
   wide: { minWidth: '680px' },
+  even: { tableLayout: 'fixed', '& th:first-child': { width: '30%' } },
   name: { textAlign: 'start' },
   breaking: { overflowWrap: 'anywhere' },
   number: { textAlign: 'end', whiteSpace: 'nowrap' },
@@ -41,17 +42,22 @@ interface DataTableProps {
   rows: readonly Row[];
   /** The last row is the sum of the others. */
   totalled?: boolean;
+  /** Each column after the first is as wide as the next, whatever they hold. */
+  even?: boolean;
   /** Wider than a small screen: it scrolls sideways, by keyboard too. */
   scrolls?: boolean;
 }
 
 /** A plain table of figures: the first cell of a row names it. */
-export function DataTable({ label, columns, rows, totalled, scrolls }: DataTableProps) {
+export function DataTable({ label, columns, rows, totalled, even, scrolls }: DataTableProps) {
   const styles = useStyles();
   const place = (column: number) =>
     columns[column]?.figures ? styles.number : mergeClasses(styles.name, !scrolls && styles.breaking);
   const table = (
-    <table className={mergeClasses(styles.table, scrolls && styles.wide)} aria-label={label}>
+    <table
+      className={mergeClasses(styles.table, scrolls && styles.wide, even && styles.even)}
+      aria-label={label}
+    >
       <thead>
         <tr>
           {columns.map((column, index) => (

@@ -9,7 +9,9 @@ import {
 import type { ReactNode } from 'react';
 import { type Control, type FieldPath, type FieldValues, useController } from 'react-hook-form';
 
-const useStyles = makeStyles({ form: { display: 'grid', gap: '14px' } });
+const useStyles = makeStyles({
+  form: { display: 'grid', gridTemplateColumns: 'minmax(0, 1fr)', gap: '14px' },
+});
 
 /** A form in one column; `fault` is what concerns the whole of it. */
 export function Form(props: {

@@ -15,6 +15,7 @@ const useStyles = makeStyles({
     fontWeight: 900,
     printColorAdjust: 'exact',
   },
+  outlined: { backgroundColor: 'transparent', border: '2px solid' },
   small: { width: '20px', height: '20px', borderRadius: '5px', fontSize: '13px' },
 });
 
@@ -23,16 +24,19 @@ export function OptionTag({
   letter,
   position,
   small,
+  outlined,
 }: {
   letter: string;
   position: number;
   small?: boolean;
+  /** Ruled out: the letter alone has the hue. */
+  outlined?: boolean;
 }) {
   const styles = useStyles();
   return (
     <span
-      className={mergeClasses(styles.tag, small && styles.small)}
-      style={{ backgroundColor: optionHue(position) }}
+      className={mergeClasses(styles.tag, small && styles.small, outlined && styles.outlined)}
+      style={outlined ? { color: optionHue(position) } : { backgroundColor: optionHue(position) }}
     >
       {letter}
     </span>

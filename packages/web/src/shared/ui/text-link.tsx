@@ -31,6 +31,19 @@ const useStyles = makeStyles({
   },
 });
 
+const usePrimaryStyles = makeStyles({
+  primary: {
+    border: `1px solid ${tokens.colorBrandBackground}`,
+    backgroundColor: tokens.colorBrandBackground,
+    color: tokens.colorNeutralForegroundOnBrand,
+    fontWeight: 700,
+    ':hover': {
+      border: `1px solid ${tokens.colorBrandBackgroundHover}`,
+      backgroundColor: tokens.colorBrandBackgroundHover,
+    },
+  },
+});
+
 export function TextLink({ className, ...props }: LinkProps) {
   return <Link {...props} className={mergeClasses(useStyles().link, className)} />;
 }
@@ -38,4 +51,9 @@ export function TextLink({ className, ...props }: LinkProps) {
 /** A link to somewhere else that looks like a button. */
 export function ButtonLink({ className, ...props }: LinkProps) {
   return <Link {...props} className={mergeClasses(useStyles().button, className)} />;
+}
+
+/** The one thing a screen is there for, where that is to go elsewhere. */
+export function PrimaryLink({ className, ...props }: LinkProps) {
+  return <ButtonLink {...props} className={mergeClasses(usePrimaryStyles().primary, className)} />;
 }

@@ -7,8 +7,10 @@ const meanings = {
   study: 'One research question with its target difference, and everything assumed to answer it.',
   option: 'One candidate design: its structure, its size, and any planning value it takes differently.',
   hold: 'What is kept equal while options are compared.',
-  holdPower: 'Each option takes the fewest units that reach this power.',
-  holdSizes: 'Each option keeps the size entered for it; what differs is the power it reaches.',
+  limit:
+    'The most clusters, participants per cluster, money or months that exist; the first broken is binding.',
+  ruling: 'Whether an option may be chosen at all, and why: admissible, with conditions, or not.',
+  choice: 'The option settled on, why, and why not each other.',
   beam: 'One option’s cost as a bar, split by arm: control outlined, active filled, all on one scale.',
   verdict: 'What the comparison comes to at the hold, worked out afresh from the figures below.',
   ledger: 'The list of what this study assumes: each value with its range and where it comes from.',

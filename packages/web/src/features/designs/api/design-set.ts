@@ -1,5 +1,7 @@
-import type { DesignSetView } from '@steelyard/api/contract/design-sets';
-import { queryOptions } from '@tanstack/react-query';
+import type { DesignSetView, OptionView } from '@steelyard/api/contract/design-sets';
+import type { LimitsView, NewLimits } from '@steelyard/api/contract/limits';
+import type { ChangedDesignSet } from '@steelyard/api/contract/options';
+import { type QueryClient, queryOptions } from '@tanstack/react-query';
 import { api } from '../../../shared/api/client';
 
 export const designSetQuery = (studyId: string) =>
@@ -7,3 +9,22 @@ export const designSetQuery = (studyId: string) =>
     queryKey: ['studies', studyId, 'design-set'],
     queryFn: ({ signal }) => api.get<DesignSetView>(`/studies/${studyId}/design-set`, signal),
   });
+
+export const limitsQuery = (studyId: string) =>
+  queryOptions({
+    queryKey: ['studies', studyId, 'limits'],
+    queryFn: ({ signal }) => api.get<LimitsView>(`/studies/${studyId}/limits`, signal),
+  });
+
+export const putDesignSet = (studyId: string, body: ChangedDesignSet) =>
+  api.put<DesignSetView>(`/studies/${studyId}/design-set`, body);
+
+export const putLimits = (studyId: string, body: NewLimits) =>
+  api.put<LimitsView>(`/studies/${studyId}/limits`, body);
+
+/** Puts one option as the server now has it into the set at hand. */
+export function keepOption(queryClient: QueryClient, studyId: string, option: OptionView): void {
+  queryClient.setQueryData(designSetQuery(studyId).queryKey, (set) =>
+    set ? { ...set, options: set.options.map((each) => (each.id === option.id ? option : each)) } : undefined,
+  );
+}

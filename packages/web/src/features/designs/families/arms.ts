@@ -39,3 +39,11 @@ export function measured({ repeated }: OptionPlan): string {
   ];
   return parts.map((part) => `, ${part}`).join('');
 }
+
+export const equalShares = (arms: number): { allocation: number[] } => ({ allocation: Array(arms).fill(1) });
+
+/** The plan with a share for each of its arms. */
+export function allocated(plan: OptionPlan): OptionPlan {
+  if (Array.isArray(plan.structure.allocation)) return plan;
+  return { ...plan, structure: { ...plan.structure, ...equalShares(plan.treatments.length) } };
+}

@@ -1,10 +1,22 @@
 import type { OptionPlan } from '@steelyard/calc';
 import { capitalised, counted } from '../../../shared/format/lists';
 import { groupSizes } from './arms';
-import type { FamilyUi } from './family-ui';
+import type { FamilyUi, StructureFormProps } from './family-ui';
 
 /** Each participant receives the treatments one after another, in the order of a sequence. */
 export const crossover: FamilyUi = {
+  name: 'Crossover',
+  describes:
+    'Each participant receives both treatments, one after the other; for lasting, stable conditions.',
+  refusal: ({ plan }) =>
+    plan.outcome.kind === 'continuous' ? undefined : 'A crossover is computed for a continuous outcome only.',
+  start: () => ({
+    family: 'crossover',
+    treatments: [0, 1],
+    structure: { sequences: ['AB', 'BA'] },
+    overrides: {},
+  }),
+  whole: (plan) => ({ ...plan, structure: { sequences: ['AB', 'BA'], ...plan.structure } }),
   summary(plan, size, { participants }) {
     const sequences = sequencesOf(plan);
     const periods = counted(sequences[0]?.length ?? 0, 'period', 'periods');
@@ -23,7 +35,18 @@ export const crossover: FamilyUi = {
       })),
     };
   },
+  Structure: CrossoverStructure,
 };
+
+function CrossoverStructure({ plan, study }: StructureFormProps) {
+  const [a, b] = plan.treatments.map((treatment) => study.treatments[treatment]?.name ?? '');
+  return (
+    <p>
+      Two sequences, half of the {study.participants.many} in each: AB gives {a}, then {b}; BA the other way
+      round. Each is compared with themselves.
+    </p>
+  );
+}
 
 function sequencesOf({ structure }: OptionPlan): string[] {
   return Array.isArray(structure.sequences) ? structure.sequences.map(String) : [];

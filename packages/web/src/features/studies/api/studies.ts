@@ -1,4 +1,5 @@
 import type { CostPlanView, LedgerView, StudySummary, StudyView } from '@steelyard/api/contract/studies';
+import type { StudyStart } from '@steelyard/api/contract/study-start';
 import { queryOptions } from '@tanstack/react-query';
 import { api } from '../../../shared/api/client';
 
@@ -26,3 +27,5 @@ export const costsQuery = (id: string) =>
     queryKey: ['studies', id, 'costs'],
     queryFn: ({ signal }) => api.get<CostPlanView>(`/studies/${id}/costs`, signal),
   });
+
+export const startStudy = (body: StudyStart) => api.post<StudyView>('/studies', body);

@@ -19,7 +19,7 @@ export function NoStudies({ administrator }: { administrator: boolean }) {
       <p className={styles.told}>
         {administrator
           ? 'An administrator looks after people and settings; what a study contains is open to its members alone.'
-          : 'You are not a member of any study. The methodologist of a study can make you one.'}
+          : 'You are not a member of any study. The methodologist of a study can make you one, or you start one of your own.'}
       </p>
     </div>
   );

@@ -45,6 +45,7 @@ const useStyles = makeStyles({
   },
   marks: { display: 'flex', flexWrap: 'wrap', gap: '6px' },
   waiting: { marginTop: '6px', fontSize: '13px', lineHeight: '18px', fontWeight: 700 },
+  choice: { color: tokens.colorNeutralForeground1, overflowWrap: 'anywhere' },
   skeleton: { display: 'grid', gap: '10px' },
 });
 
@@ -83,6 +84,11 @@ export function StudyList({ studies, hrefOf }: StudyListProps) {
               <Chip>{capitalised(study.role)}</Chip>
             </div>
             <span>{counted(study.options, 'option', 'options')}</span>
+            {study.choice && (
+              <strong className={styles.choice}>
+                Chosen: {study.choice.letter}, {study.choice.name}
+              </strong>
+            )}
             <span>
               changed <Moment iso={study.changedAt} />
             </span>

@@ -7,9 +7,10 @@ import { optionHue, ownTokens } from '../../../shared/ui/own-tokens';
 import { Schedule } from '../../designs/components/schedule';
 import { familyUiOf } from '../../designs/families/registry';
 import { beamOf } from '../model/beams';
-import type { Weighed } from '../model/weighing';
+import type { Weighed, Weighing } from '../model/weighing';
 import { Beam } from './beam';
 import { OutOfReach } from './out-of-reach';
+import { StandingCell } from './standing-cell';
 
 const narrow = '@media (max-width: 640px)';
 
@@ -81,6 +82,7 @@ const useStyles = makeStyles({
     whiteSpace: 'nowrap',
     [narrow]: { fontSize: '15px', gridRow: 3, textAlign: 'start' },
   },
+  standing: { paddingLeft: '16px', [narrow]: { paddingLeft: 0, gridColumn: '1 / 5', gridRow: 4 } },
   exact: { position: 'relative', zIndex: 1 },
   unit: {
     display: 'none',
@@ -96,15 +98,16 @@ const useStyles = makeStyles({
 interface BeamRowProps {
   option: Weighed;
   scale: number;
-  currency: string;
+  weighing: Weighing;
   selected: boolean;
   onSelect: () => void;
 }
 
 /** One option: its button reaches over the whole row. */
-export function BeamRow({ option, scale, currency, selected, onSelect }: BeamRowProps) {
+export function BeamRow({ option, scale, weighing, selected, onSelect }: BeamRowProps) {
   const styles = useStyles();
-  const { family, plan, words, appraisal, position, letter, name } = option;
+  const { family, plan, words, appraisal, position, letter, name, ruling, draft } = option;
+  const ruledOut = ruling?.kind === 'not-admissible';
   const hue = optionHue(position);
   const face = familyUiOf(family);
   const size = appraisal?.feasible ? appraisal : null;
@@ -112,10 +115,12 @@ export function BeamRow({ option, scale, currency, selected, onSelect }: BeamRow
     <tr className={mergeClasses(styles.row, selected && styles.selected)}>
       <th scope="row" className={mergeClasses(styles.cell, styles.option)}>
         <button type="button" aria-pressed={selected} className={styles.choice} onClick={onSelect}>
-          <OptionTag letter={letter} position={position} />
+          <OptionTag letter={letter} position={position} outlined={ruledOut} />
           <span>
             <span className={styles.name}>{name}</span>{' '}
             <span className={styles.summary}>{face.summary(plan, size, words)}</span>
+            {ruledOut && <span className={styles.summary}>Not admissible: {ruling.reason}</span>}
+            {draft && <span className={styles.summary}>Edits not saved</span>}
           </span>
         </button>
       </th>
@@ -129,9 +134,9 @@ export function BeamRow({ option, scale, currency, selected, onSelect }: BeamRow
         />
       </td>
       {size ? (
-        <Figures size={size} option={option} scale={scale} currency={currency} hue={hue} />
+        <Figures size={size} option={option} scale={scale} weighing={weighing} hue={hue} />
       ) : (
-        <td colSpan={4} className={mergeClasses(styles.cell, styles.cost)}>
+        <td colSpan={5} className={mergeClasses(styles.cell, styles.cost)}>
           <OutOfReach option={option} />
         </td>
       )}
@@ -143,18 +148,27 @@ interface FiguresProps {
   size: Feasible;
   option: Weighed;
   scale: number;
-  currency: string;
+  weighing: Weighing;
   hue: string;
 }
 
-function Figures({ size, option, scale, currency, hue }: FiguresProps) {
+function Figures({ size, option, scale, weighing, hue }: FiguresProps) {
   const styles = useStyles();
+  const { currency, limits } = weighing;
+  const most = limits.limits.money;
   const { costs, timeline } = size;
   const figure = mergeClasses(styles.cell, styles.figure);
   return (
     <>
       <td className={mergeClasses(styles.cell, styles.cost)}>
-        {costs && <Beam parts={beamOf(option, scale)} hue={hue} currency={currency} />}
+        {costs && (
+          <Beam
+            parts={beamOf(option, scale)}
+            hue={hue}
+            currency={currency}
+            limit={most === undefined ? undefined : { amount: most, at: most / scale }}
+          />
+        )}
       </td>
       <td className={figure}>
         {power(size.power)} <span className={styles.unit}>power</span>
@@ -177,6 +191,9 @@ function Figures({ size, option, scale, currency, hue }: FiguresProps) {
           '–'
         )}{' '}
         <span className={styles.unit}>months</span>
+      </td>
+      <td className={mergeClasses(styles.cell, styles.standing)}>
+        <StandingCell option={option} weighing={weighing} />
       </td>
     </>
   );

@@ -12,14 +12,17 @@ export function Beam({
   parts,
   hue,
   currency,
+  limit,
 }: {
   parts: readonly BeamPart[];
   hue: string;
   currency: string;
+  /** The limit of money, drawn through the beam. */
+  limit: { amount: number; at: number } | undefined;
 }) {
   const styles = useStyles();
   return (
-    <svg className={styles.beam} role="img" aria-label={beamInWords(parts, currency)}>
+    <svg className={styles.beam} role="img" aria-label={beamInWords(parts, currency, limit?.amount)}>
       {/* Control last, so that its outline lies over its neighbour. */}
       {parts.toReversed().map(({ name, from, width, active }) => (
         <rect
@@ -33,6 +36,17 @@ export function Beam({
           strokeWidth="1.5"
         />
       ))}
+      {limit && (
+        <line
+          x1={percent(limit.at)}
+          x2={percent(limit.at)}
+          y1="0"
+          y2="26"
+          stroke={tokens.colorNeutralForeground1}
+          strokeWidth="2"
+          strokeDasharray="3 2"
+        />
+      )}
     </svg>
   );
 }

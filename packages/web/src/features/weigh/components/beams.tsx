@@ -21,10 +21,11 @@ const useStyles = makeStyles({
     ':first-child': { paddingLeft: '14px' },
     ':last-child': { paddingRight: '14px' },
   },
-  option: { width: '30%' },
+  option: { width: '26%' },
   schedule: { width: '78px' },
   scaled: { display: 'flex', justifyContent: 'space-between', gap: '8px' },
-  figure: { width: '76px', textAlign: 'end' },
+  figure: { width: '68px', textAlign: 'end' },
+  standing: { width: '22%', paddingLeft: '16px' },
   rows: { [narrow]: { display: 'block' } },
 });
 
@@ -35,10 +36,11 @@ interface BeamsProps {
 }
 
 /** The options as rows, each with its beam; arrow keys go from row to row, Enter or the space bar chooses one. */
-export function Beams({ weighing: { options, currency }, selected, onSelect }: BeamsProps) {
+export function Beams({ weighing, selected, onSelect }: BeamsProps) {
   const styles = useStyles();
+  const { options, currency, limits } = weighing;
   const rows = useRef<HTMLTableSectionElement>(null);
-  const scale = beamScale(options);
+  const scale = beamScale(options, limits.limits.money);
 
   const onKeyDown = (event: KeyboardEvent) => {
     const choices = [...(rows.current?.querySelectorAll<HTMLElement>('button[aria-pressed]') ?? [])];
@@ -66,6 +68,7 @@ export function Beams({ weighing: { options, currency }, selected, onSelect }: B
           <th className={mergeClasses(styles.head, styles.figure)}>Power</th>
           <th className={mergeClasses(styles.head, styles.figure)}>Cost</th>
           <th className={mergeClasses(styles.head, styles.figure)}>Months</th>
+          <th className={mergeClasses(styles.head, styles.standing)}>Against the limits</th>
         </tr>
       </thead>
       <tbody ref={rows} className={styles.rows} onKeyDown={onKeyDown}>
@@ -74,7 +77,7 @@ export function Beams({ weighing: { options, currency }, selected, onSelect }: B
             key={option.id}
             option={option}
             scale={scale}
-            currency={currency}
+            weighing={weighing}
             selected={option.id === selected}
             onSelect={() => onSelect(option.id)}
           />

@@ -1,5 +1,6 @@
 import { makeStyles } from '@fluentui/react-components';
 import type { Feasible, Hold } from '@steelyard/calc';
+import type { ReactNode } from 'react';
 import { capitalised } from '../../../shared/format/lists';
 import { count, percent, power } from '../../../shared/format/numbers';
 import { DataTable } from '../../../shared/ui/data-table';
@@ -23,8 +24,15 @@ const useStyles = makeStyles({
   },
 });
 
+interface OptionDetailsProps {
+  option: Weighed;
+  weighing: Weighing;
+  /** Where its structure and overrides are edited; without it the ledger's values are read. */
+  form?: ReactNode;
+}
+
 /** All that is known of one option: its size, what it rests on, its groups, money, months and cautions. */
-export function OptionDetails({ option, weighing }: { option: Weighed; weighing: Weighing }) {
+export function OptionDetails({ option, weighing, form }: OptionDetailsProps) {
   const styles = useStyles();
   const { appraisal } = option;
   const { study, ledger, currency } = weighing;
@@ -32,16 +40,18 @@ export function OptionDetails({ option, weighing }: { option: Weighed; weighing:
   return (
     <div className={styles.details}>
       {size ? <SizeOfOption option={option} weighing={weighing} /> : <OutOfReach option={option} />}
-      <TitledSection
-        level={3}
-        title={
-          <>
-            From the <Word is="ledger">ledger</Word>
-          </>
-        }
-      >
-        <LedgerValues assumptions={assumptionsOf(option, ledger, study.outcomeUnit)} />
-      </TitledSection>
+      {form ?? (
+        <TitledSection
+          level={3}
+          title={
+            <>
+              From the <Word is="ledger">ledger</Word>
+            </>
+          }
+        >
+          <LedgerValues assumptions={assumptionsOf(option, ledger, study.outcomeUnit)} />
+        </TitledSection>
+      )}
       {size?.costs && (
         <CostsOfOption costs={size.costs} size={size} arms={option.words.arms} currency={currency} />
       )}
@@ -82,10 +92,11 @@ function sizeFacts(size: Feasible, { family, plan, words }: Weighed, hold: Hold)
   const { clusters, recruitedClusters, clusterSize } = size;
   const participants = capitalised(words.participants.many);
   const clustersNoun = capitalised(words.clusters.many);
-  const reached =
-    hold.kind === 'power'
-      ? `fewest that reach ${percent(hold.power)}: ${power(size.power)}, sizes round up`
-      : `as entered: ${power(size.power)}`;
+  const reached = {
+    power: `fewest that reach ${percent(hold.power)}: ${power(size.power)}, sizes round up`,
+    budget: `the most within the budget: ${power(size.power)}`,
+    sizes: `as entered: ${power(size.power)}`,
+  }[hold.kind];
   return [
     { name: familyUiOf(family).sizeNoun(plan, words), value: count(size.units), note: reached },
     ...(clusterSize === undefined

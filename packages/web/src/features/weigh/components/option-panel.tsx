@@ -1,5 +1,6 @@
 import { Button, makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
 import { ChevronDoubleLeftRegular, ChevronDoubleRightRegular } from '@fluentui/react-icons';
+import type { ReactNode } from 'react';
 import { usePreferences } from '../../../shared/preferences';
 import { OptionTag } from '../../../shared/ui/option-tag';
 import { ButtonLink } from '../../../shared/ui/text-link';
@@ -49,10 +50,15 @@ interface OptionPanelProps {
   option: Weighed;
   weighing: Weighing;
   workingHref: string;
+  /** What stands before the figures: the ruling. */
+  ruling: ReactNode;
+  form: ReactNode;
+  /** What may be done with the option as a whole. */
+  actions: ReactNode;
 }
 
 /** The chosen option beside the beams, or below them where there is less room; it folds away. */
-export function OptionPanel({ option, weighing, workingHref }: OptionPanelProps) {
+export function OptionPanel({ option, weighing, workingHref, ruling, form, actions }: OptionPanelProps) {
   const styles = useStyles();
   const folded = usePreferences((preferences) => preferences.panelFolded);
   return (
@@ -61,7 +67,11 @@ export function OptionPanel({ option, weighing, workingHref }: OptionPanelProps)
       className={mergeClasses(styles.panel, folded && styles.folded)}
     >
       <div className={mergeClasses(styles.head, folded && styles.headFolded)}>
-        <OptionTag letter={option.letter} position={option.position} />
+        <OptionTag
+          letter={option.letter}
+          position={option.position}
+          outlined={option.ruling?.kind === 'not-admissible'}
+        />
         <h2 className={mergeClasses(styles.name, folded && styles.nameFolded)}>{option.name}</h2>
         <Button
           appearance="subtle"
@@ -75,9 +85,11 @@ export function OptionPanel({ option, weighing, workingHref }: OptionPanelProps)
       </div>
       {!folded && (
         <>
-          <OptionDetails option={option} weighing={weighing} />
+          {ruling}
+          <OptionDetails option={option} weighing={weighing} form={form} />
           <div className={styles.links}>
             <ButtonLink to={workingHref}>Working</ButtonLink>
+            {actions}
           </div>
         </>
       )}

@@ -1,4 +1,5 @@
 import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
+import type { ReactNode } from 'react';
 import { capitalised, counted } from '../../../shared/format/lists';
 import { figure, percent, withUnit } from '../../../shared/format/numbers';
 import { ownTokens } from '../../../shared/ui/own-tokens';
@@ -15,6 +16,10 @@ const useStyles = makeStyles({
   },
   sub: { marginBottom: '10px', color: tokens.colorNeutralForeground2, fontSize: '13px', lineHeight: '20px' },
   verdict: {
+    display: 'flex',
+    flexWrap: 'wrap',
+    alignItems: 'center',
+    gap: '8px 14px',
     padding: '10px 14px',
     marginBottom: '10px',
     border: `1px solid ${tokens.colorNeutralStroke2}`,
@@ -28,50 +33,38 @@ const useStyles = makeStyles({
   },
   amiss: { borderLeft: `4px solid ${ownTokens.over}` },
   label: { color: tokens.colorNeutralForeground2, fontSize: '13px', lineHeight: '18px' },
-  hold: {
-    display: 'flex',
-    alignItems: 'center',
-    flexWrap: 'wrap',
-    gap: '4px 10px',
-    marginBottom: '10px',
-    color: tokens.colorNeutralForeground2,
-    fontSize: '13px',
-    lineHeight: '20px',
-  },
+  words: { flex: '1 1 260px', minWidth: 0 },
 });
 
-/** The question with what it is planned on, the verdict, and what is held equal. */
-export function WeighHead({ weighing }: { weighing: Weighing }) {
+/** The question with what it is planned on, the verdict with what may be done about it, and what follows. */
+export function WeighHead({
+  weighing,
+  action,
+  children,
+}: {
+  weighing: Weighing;
+  action?: ReactNode;
+  children?: ReactNode;
+}) {
   const styles = useStyles();
-  const { study, verdict, hold, currency, options } = weighing;
+  const { study, verdict, options } = weighing;
   const standing = options.some(({ appraisal }) => appraisal?.feasible);
   return (
     <>
       <h1 className={styles.question}>{study.question}</h1>
       <p className={styles.sub}>{subLine(weighing)}</p>
       <section aria-label="Verdict" className={mergeClasses(styles.verdict, !standing && styles.amiss)}>
-        <p className={styles.label}>
-          <Word is="verdict">Verdict</Word>
-        </p>
-        <p>
-          <strong>{verdict.headline}</strong> {verdict.detail}
-        </p>
+        <div className={styles.words}>
+          <p className={styles.label}>
+            <Word is="verdict">Verdict</Word>
+          </p>
+          <p>
+            <strong>{verdict.headline}</strong> {verdict.detail}
+          </p>
+        </div>
+        {action}
       </section>
-      {options.length > 0 && (
-        <p className={styles.hold}>
-          <Word is="hold">Hold</Word>
-          {hold.kind === 'power' ? (
-            <Word is="holdPower" chip>
-              Power {percent(hold.power)}
-            </Word>
-          ) : (
-            <Word is="holdSizes" chip>
-              Sizes
-            </Word>
-          )}
-          <span>Money in {currency}</span>
-        </p>
-      )}
+      {children}
     </>
   );
 }
@@ -90,6 +83,11 @@ function subLine({ study, ledger, options }: Weighing): string {
       : []),
     ...(plan.outcome.kind === 'binary' && control !== undefined ? [`control ${percent(control)}`] : []),
     `${sides === 2 ? 'two-sided' : 'one-sided'} ${percent(alpha)}`,
-    counted(options.length, 'option', 'options'),
+    counted(options.length, 'option', 'options') + ruledOut(options),
   ].join(' · ');
+}
+
+function ruledOut(options: Weighing['options']): string {
+  const many = options.filter(({ ruling }) => ruling?.kind === 'not-admissible').length;
+  return many === 0 ? '' : `, ${counted(many, 'not admissible', 'not admissible')}`;
 }

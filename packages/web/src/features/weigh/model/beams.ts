@@ -10,9 +10,9 @@ export interface BeamPart {
   active: boolean;
 }
 
-/** The scale that all beams share: the dearest option, rounded up to a figure one can read. */
-export function beamScale(options: readonly Weighed[]): number {
-  return niceCeiling(Math.max(0, ...options.map((option) => totalOf(option) ?? 0)));
+/** The scale that all beams share: the dearest option or the limit, rounded up to a figure one can read. */
+export function beamScale(options: readonly Weighed[], limit = 0): number {
+  return niceCeiling(Math.max(limit, ...options.map((option) => totalOf(option) ?? 0)));
 }
 
 export function beamOf({ appraisal, words }: Weighed, scale: number): BeamPart[] {
@@ -25,8 +25,9 @@ export function beamOf({ appraisal, words }: Weighed, scale: number): BeamPart[]
   });
 }
 
-export function beamInWords(parts: readonly BeamPart[], currency: string): string {
-  return `Cost by arm: ${parts.map(({ name, cost }) => `${name} ${money(cost, currency)}`).join(', ')}`;
+export function beamInWords(parts: readonly BeamPart[], currency: string, limit?: number): string {
+  const arms = parts.map(({ name, cost }) => `${name} ${money(cost, currency)}`).join(', ');
+  return `Cost by arm: ${arms}${limit === undefined ? '' : `; the limit is ${money(limit, currency)}`}`;
 }
 
 /** What the beams show together: the shortest and the longest. */

@@ -1,0 +1,41 @@
+import { Checkbox, makeStyles } from '@fluentui/react-components';
+import { type Control, useController } from 'react-hook-form';
+import { NumberField } from '../../../shared/ui/number-field';
+import type { OptionDraft } from '../families/family-ui';
+
+const useStyles = makeStyles({ fields: { display: 'grid', gap: '8px' } });
+
+/** Whether a continuous outcome is measured once or more often, and how often. */
+export function MeasurementFields({ control }: { control: Control<OptionDraft> }) {
+  const styles = useStyles();
+  const { field } = useController({ control, name: 'plan.repeated' });
+  return (
+    <div className={styles.fields}>
+      <Checkbox
+        label="Measured more than once: baselines before, follow-ups after"
+        checked={Boolean(field.value)}
+        onChange={(_, { checked }) => field.onChange(checked ? { baselines: 1, followUps: 1 } : undefined)}
+      />
+      {field.value && (
+        <>
+          <NumberField
+            beside
+            kind="whole"
+            label="Baselines"
+            hint="Each participant is adjusted for where they began."
+            control={control}
+            name="plan.repeated.baselines"
+          />
+          <NumberField
+            beside
+            kind="whole"
+            label="Follow-ups"
+            hint="Their mean is compared."
+            control={control}
+            name="plan.repeated.followUps"
+          />
+        </>
+      )}
+    </div>
+  );
+}

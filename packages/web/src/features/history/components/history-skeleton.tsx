@@ -1,0 +1,14 @@
+import { makeStyles, Skeleton, SkeletonItem } from '@fluentui/react-components';
+
+const useStyles = makeStyles({ skeleton: { display: 'grid', gap: '10px' } });
+
+export function HistorySkeleton() {
+  const styles = useStyles();
+  return (
+    <Skeleton aria-label="Loading the history" className={styles.skeleton}>
+      <SkeletonItem size={72} />
+      <SkeletonItem size={72} />
+      <SkeletonItem size={72} />
+    </Skeleton>
+  );
+}

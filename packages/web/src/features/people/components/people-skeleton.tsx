@@ -1,0 +1,13 @@
+import { makeStyles, Skeleton, SkeletonItem } from '@fluentui/react-components';
+
+const useStyles = makeStyles({ skeleton: { display: 'grid', gap: '10px' } });
+
+export function PeopleSkeleton() {
+  const styles = useStyles();
+  return (
+    <Skeleton aria-label="Loading the people" className={styles.skeleton}>
+      <SkeletonItem size={72} />
+      <SkeletonItem size={72} />
+    </Skeleton>
+  );
+}

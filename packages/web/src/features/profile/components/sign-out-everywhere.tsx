@@ -1,0 +1,26 @@
+import { Button, MessageBar, MessageBarBody, makeStyles } from '@fluentui/react-components';
+import { useMutation } from '@tanstack/react-query';
+import { messageOf } from '../../../shared/api/faults';
+import { signOutEverywhere } from '../api/profile';
+
+const useStyles = makeStyles({ body: { display: 'grid', gap: '14px' } });
+
+export function SignOutEverywhere({ onSignedOut }: { onSignedOut: () => void }) {
+  const styles = useStyles();
+  const leave = useMutation({ mutationFn: signOutEverywhere, onSuccess: onSignedOut });
+  return (
+    <div className={styles.body}>
+      <p>Ends your sessions in every browser and on every device, this one too. Sign in again to go on.</p>
+      {leave.isError && (
+        <MessageBar intent="error" layout="multiline" role="alert">
+          <MessageBarBody>{messageOf(leave.error)}</MessageBarBody>
+        </MessageBar>
+      )}
+      <div>
+        <Button disabledFocusable={leave.isPending} onClick={() => leave.mutate()}>
+          Sign out everywhere
+        </Button>
+      </div>
+    </div>
+  );
+}

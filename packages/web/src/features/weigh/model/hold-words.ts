@@ -1,0 +1,10 @@
+import type { Hold } from '@steelyard/calc';
+import { money } from '../../../shared/format/money';
+import { percent } from '../../../shared/format/numbers';
+
+/** A kind of hold, with its value where it is the one in force: “Power 80 %”. */
+export function holdInWords(kind: Hold['kind'], hold: Hold, currency: string): string {
+  if (kind === 'power') return hold.kind === 'power' ? `Power ${percent(hold.power)}` : 'Power';
+  if (kind === 'budget') return hold.kind === 'budget' ? `Budget ${money(hold.budget, currency)}` : 'Budget';
+  return 'Sizes';
+}

@@ -1,0 +1,244 @@
+import type { OptionView } from '@steelyard/api/contract/design-sets';
+import { screen, waitFor, within } from '@testing-library/react';
+import { HttpResponse, http } from 'msw';
+import { describe, expect, it } from 'vitest';
+import { greenkettle } from './fixtures/greenkettle';
+import { nimblegrip } from './fixtures/nimblegrip';
+import { id, type StudyFixture } from './fixtures/study-fixture';
+import { openApp } from './open-app';
+import { answer, problem, serve, server } from './server';
+import { openWeigh, optionRow as row } from './weigh-page';
+
+const form = () => within(screen.getByRole('form', { name: 'Option' }));
+const save = () => form().getByRole('button', { name: 'Save' });
+
+/** The server stores what is put and answers with it from then on. */
+function storesOptions({ designSet }: StudyFixture) {
+  const sent: unknown[] = [];
+  server.use(
+    http.put('*/api/studies/:id/options/:optionId', async ({ request, params }) => {
+      const body = (await request.json()) as OptionView;
+      sent.push(body);
+      const at = designSet.options.findIndex((each) => each.id === params.optionId);
+      const stored = { ...designSet.options[at], ...body, version: body.version + 1 } as OptionView;
+      designSet.options[at] = stored;
+      return HttpResponse.json(stored);
+    }),
+  );
+  return sent;
+}
+
+async function resize(user: Awaited<ReturnType<typeof openWeigh>>['user'], each: string) {
+  await user.clear(form().getByLabelText('Girls in each catchment'));
+  await user.type(form().getByLabelText('Girls in each catchment'), each);
+}
+
+describe('An option’s form', () => {
+  it('draws an edit at once and stores it on Save', async () => {
+    const fixture = greenkettle();
+    const { user } = await openWeigh(fixture);
+    const sent = storesOptions(fixture);
+    expect(row(/Cluster/)).toHaveTextContent('44 catchments × 40');
+    await resize(user, '60');
+    await waitFor(() => expect(row(/Cluster/)).toHaveTextContent('catchments × 60'));
+    expect(row(/Cluster/)).toHaveTextContent('Edits not saved');
+    await user.click(save());
+    await waitFor(() => expect(row(/Cluster/)).not.toHaveTextContent('Edits not saved'));
+    expect(sent).toEqual([
+      {
+        version: 1,
+        name: 'Cluster, end only',
+        plan: {
+          family: 'cluster',
+          treatments: [0, 1],
+          structure: { allocation: [1, 1] },
+          clusterSize: 60,
+          overrides: {},
+        },
+      },
+    ]);
+    expect(form().getByRole('status')).toHaveTextContent('Saved');
+  });
+
+  it('keeps edits that were not saved through a reload, for the person who made them', async () => {
+    const fixture = greenkettle();
+    const first = await openWeigh(fixture);
+    await resize(first.user, '60');
+    await waitFor(() =>
+      expect(localStorage.getItem('steelyard-option-drafts')).toContain('"clusterSize":60'),
+    );
+    document.body.replaceChildren();
+    await openWeigh(fixture);
+    expect(form().getByLabelText('Girls in each catchment')).toHaveValue('60');
+    document.body.replaceChildren();
+    serve(fixture);
+    server.use(
+      answer.session({ id: id(), name: 'Amara Doss', email: 'a@example.org', administrator: false }),
+    );
+    openApp(`/studies/${fixture.study.id}/weigh`);
+    expect(await screen.findByLabelText('Girls in each catchment')).toHaveValue('40');
+  });
+
+  it('discards edits on request', async () => {
+    const { user } = await openWeigh(greenkettle());
+    await resize(user, '60');
+    await user.click(form().getByRole('button', { name: 'Discard' }));
+    expect(form().getByLabelText('Girls in each catchment')).toHaveValue('40');
+    await waitFor(() => expect(row(/Cluster/)).toHaveTextContent('44 catchments × 40'));
+  });
+
+  it('goes to the sign-in page when the session has ended, and loses nothing', async () => {
+    const fixture = greenkettle();
+    const { user, address } = await openWeigh(fixture);
+    await resize(user, '60');
+    server.use(
+      http.put('*/api/studies/:id/options/:optionId', () => problem(401, 'signed-out')),
+      http.get('*/api/studies/:id', () => problem(401, 'signed-out')),
+      http.get('*/api/studies/:id/:part', () => problem(401, 'signed-out')),
+      answer.access(),
+    );
+    await user.click(save());
+    await waitFor(() => expect(address()).toMatch(/^\/sign-in\?from=/));
+    expect(localStorage.getItem('steelyard-option-drafts')).toContain('"clusterSize":60');
+  });
+
+  it('puts a refusal at the field it concerns and keeps the text', async () => {
+    const { user } = await openWeigh(greenkettle());
+    server.use(
+      http.put('*/api/studies/:id/options/:optionId', () =>
+        problem(422, 'invalid', {
+          issues: [{ path: 'plan.clusterSize', message: 'No cluster is so small.' }],
+        }),
+      ),
+    );
+    await resize(user, '3');
+    await user.click(save());
+    expect(await form().findByText('No cluster is so small.')).toBeVisible();
+    expect(form().getByLabelText('Girls in each catchment')).toHaveValue('3');
+  });
+
+  it('shows both versions when someone else stored another, and lets the person keep theirs', async () => {
+    const fixture = greenkettle();
+    const { user } = await openWeigh(fixture);
+    const [mine] = fixture.designSet.options as [OptionView];
+    const theirs = { ...mine, version: 2, plan: { ...mine.plan, clusterSize: 50 } };
+    server.use(
+      http.get('*/api/studies/:id/history', () =>
+        HttpResponse.json({
+          entries: [
+            {
+              id: 9,
+              at: '2026-11-20T10:00:00.000Z',
+              by: 'Amara Doss',
+              action: 'changed',
+              what: 'option “Cluster, end only”',
+              before: null,
+              after: null,
+            },
+          ],
+          next: null,
+        }),
+      ),
+      http.put('*/api/studies/:id/options/:optionId', () => {
+        fixture.designSet.options = [theirs];
+        return problem(409, 'stale', { current: theirs });
+      }),
+    );
+    await resize(user, '60');
+    await user.click(save());
+    const table = await screen.findByRole('table', { name: 'Both versions' });
+    expect(within(table).getByRole('row', { name: 'Cluster size 60 50' })).toBeVisible();
+    expect(await screen.findByText('Amara Doss')).toBeVisible();
+    expect(form().getByLabelText('Girls in each catchment')).toHaveValue('60');
+    const sent = storesOptions(fixture);
+    await user.click(screen.getByRole('button', { name: 'Keep mine' }));
+    await user.click(save());
+    await waitFor(() => expect(sent).toMatchObject([{ version: 2, plan: { clusterSize: 60 } }]));
+  });
+
+  it('takes the other version where the person prefers it', async () => {
+    const fixture = greenkettle();
+    const { user } = await openWeigh(fixture);
+    const [mine] = fixture.designSet.options as [OptionView];
+    const theirs = { ...mine, version: 2, plan: { ...mine.plan, clusterSize: 50 } };
+    server.use(
+      http.get('*/api/studies/:id/history', () => HttpResponse.json({ entries: [], next: null })),
+      http.put('*/api/studies/:id/options/:optionId', () => {
+        fixture.designSet.options = [theirs];
+        return problem(409, 'stale', { current: theirs });
+      }),
+    );
+    await resize(user, '60');
+    await user.click(save());
+    await user.click(await screen.findByRole('button', { name: 'Take theirs' }));
+    expect(form().getByLabelText('Girls in each catchment')).toHaveValue('50');
+    expect(screen.queryByRole('table', { name: 'Both versions' })).not.toBeInTheDocument();
+    await waitFor(() => expect(row(/Cluster/)).toHaveTextContent('× 50'));
+  });
+
+  it('enters the size that the hold takes, for when sizes are kept', async () => {
+    const fixture = greenkettle();
+    const { user } = await openWeigh(fixture);
+    const sent = storesOptions(fixture);
+    await user.click(form().getByRole('button', { name: 'Enter 22, as taken now' }));
+    expect(form().getByLabelText('Catchments in each arm')).toHaveValue('22');
+    await user.click(save());
+    await waitFor(() => expect(sent).toMatchObject([{ plan: { units: 22 } }]));
+  });
+
+  it('takes an override with its reason beside the ledger’s value', async () => {
+    const fixture = greenkettle();
+    const { user } = await openWeigh(fixture);
+    const sent = storesOptions(fixture);
+    await user.click(form().getByRole('button', { name: 'Override ICC' }));
+    await user.type(form().getByLabelText('ICC, here'), '0.02');
+    await user.click(save());
+    expect(await form().findByText('Say why this option takes a value of its own.')).toBeVisible();
+    await user.type(form().getByLabelText('Reason for this ICC'), 'A newer pilot.');
+    await user.click(save());
+    await waitFor(() =>
+      expect(sent).toMatchObject([
+        { plan: { overrides: { icc: { value: 0.02, reason: 'A newer pilot.' } } } },
+      ]),
+    );
+    await user.click(form().getByRole('button', { name: 'Take ICC from the ledger' }));
+    await user.click(save());
+    await waitFor(() => expect(sent[1]).toMatchObject({ plan: { overrides: {} } }));
+  });
+
+  it('refuses an ICC above 1 at its field', async () => {
+    const { user } = await openWeigh(greenkettle());
+    await user.click(form().getByRole('button', { name: 'Override ICC' }));
+    await user.type(form().getByLabelText('ICC, here'), '1.2');
+    expect(await form().findByText('It must lie between 0 and 1.')).toBeVisible();
+  });
+
+  it('takes a larger control arm as an expression, and an adjustment in plain words', async () => {
+    const fixture = nimblegrip();
+    const { user } = await openWeigh(fixture);
+    const sent = storesOptions(fixture);
+    await user.clear(form().getByLabelText('Advice sheet'));
+    await user.type(form().getByLabelText('Advice sheet'), '√3');
+    await user.click(form().getByRole('radio', { name: /^Bonferroni\./ }));
+    expect(await form().findByText('= 1.7321')).toBeVisible();
+    await user.click(save());
+    await waitFor(() =>
+      expect(sent).toMatchObject([
+        {
+          plan: { structure: { allocation: [Math.sqrt(3), 1, 1, 1], comparisons: { adjust: 'bonferroni' } } },
+        },
+      ]),
+    );
+  });
+
+  it('drops an arm with its share', async () => {
+    const fixture = nimblegrip();
+    const { user } = await openWeigh(fixture);
+    const sent = storesOptions(fixture);
+    await user.click(form().getByRole('checkbox', { name: '4 sessions' }));
+    await user.click(save());
+    await waitFor(() =>
+      expect(sent).toMatchObject([{ plan: { treatments: [0, 1, 3], structure: { allocation: [1, 1, 1] } } }]),
+    );
+  });
+});
