@@ -111,6 +111,18 @@ describe('The ledger', () => {
     expect(useKeptEdits.getState().edits).toEqual({});
   });
 
+  it('keeps text that is no number through a reload, and says so', async () => {
+    const fixture = stillfoot();
+    const { user } = await openLedger(fixture);
+    await user.click(screen.getByRole('button', { name: 'Change Standard deviation' }));
+    await user.clear(screen.getByRole('textbox', { name: 'Value' }));
+    await user.type(screen.getByRole('textbox', { name: 'Value' }), 'two');
+    cleanup();
+    await openLedger(fixture);
+    expect(screen.getByRole('textbox', { name: 'Value' })).toHaveValue('two');
+    expect(screen.getByText(/^“two” is not a number/)).toBeVisible();
+  });
+
   it('puts both versions side by side when somebody saved first, and loses neither', async () => {
     const fixture = stillfoot();
     const { study, ledger } = fixture;

@@ -1,9 +1,9 @@
-import { screen, waitFor, within } from '@testing-library/react';
+import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
 import { describe, expect, it } from 'vitest';
 import { greenkettle } from './fixtures/greenkettle';
 import type { StudyFixture } from './fixtures/study-fixture';
-import { problem, server } from './server';
+import { answer, problem, server } from './server';
 import { openWeigh, optionRow } from './weigh-page';
 
 const limits = { clusters: 32, participantsPerCluster: 60, money: 800_000, months: 30 };
@@ -21,6 +21,21 @@ function takes(fixture: StudyFixture, what: 'limits' | 'design-set') {
     }),
   );
   return sent;
+}
+
+/** The session ends as something is sent, and the page is left for another sign-in. */
+async function loseTheSession(what: 'limits' | 'design-set', send: () => Promise<void>) {
+  server.use(
+    http.put(`*/api/studies/:id/${what}`, () => problem(401, 'signed-out')),
+    http.get('*/api/studies/:id', () => problem(401, 'signed-out')),
+    http.get('*/api/studies/:id/:part', () => problem(401, 'signed-out')),
+    answer.session(null),
+    answer.access(),
+  );
+  await send();
+  expect(await screen.findByText(/Your session has ended/)).toBeVisible();
+  server.resetHandlers();
+  cleanup();
 }
 
 const row = () => optionRow(/Cluster/);
@@ -77,6 +92,37 @@ describe('Limits', () => {
     await user.click(screen.getByRole('button', { name: 'Set the limits' }));
     expect(await screen.findByText('The number of clusters must be a whole number.')).toBeVisible();
     expect(screen.getByLabelText('Catchments')).toBeInvalid();
+  });
+
+  it('keep what was typed through a reload and a lost session, until they are set or cancelled', async () => {
+    const fixture = greenkettle();
+    const first = await openWeigh(fixture);
+    await first.user.click(screen.getByRole('button', { name: 'Set limits' }));
+    await first.user.type(screen.getByLabelText('Months'), 'thirty');
+    cleanup();
+    const second = await openWeigh(fixture);
+    await second.user.click(screen.getByRole('button', { name: 'Set limits' }));
+    expect(screen.getByLabelText('Months')).toHaveValue('thirty');
+    expect(screen.getByText(/^“thirty” is not a number/)).toBeVisible();
+    await second.user.clear(screen.getByLabelText('Months'));
+    await second.user.type(screen.getByLabelText('Months'), '30');
+    await loseTheSession('limits', () =>
+      second.user.click(screen.getByRole('button', { name: 'Set the limits' })),
+    );
+    const { user } = await openWeigh(fixture);
+    const sent = takes(fixture, 'limits');
+    await user.click(screen.getByRole('button', { name: 'Set limits' }));
+    expect(screen.getByLabelText('Months')).toHaveValue('30');
+    await user.click(screen.getByRole('button', { name: 'Set the limits' }));
+    await waitFor(() => expect(screen.queryByRole('dialog')).not.toBeInTheDocument());
+    expect(sent).toEqual([{ version: null, limits: { months: 30 } }]);
+    expect(sessionStorage).toHaveLength(0);
+    await user.click(screen.getByRole('button', { name: 'More limits' }));
+    await user.type(screen.getByLabelText('Months'), '6');
+    expect(sessionStorage).toHaveLength(1);
+    await user.click(screen.getByRole('button', { name: 'Cancel' }));
+    await user.click(screen.getByRole('button', { name: 'More limits' }));
+    expect(screen.getByLabelText('Months')).toHaveValue('30');
   });
 
   it('that someone else has set meanwhile are shown beside what was typed, which stays', async () => {
@@ -150,6 +196,39 @@ describe('The hold', () => {
     await user.type(dialog.getByLabelText('Power'), '90');
     await user.click(dialog.getByRole('button', { name: 'Hold' }));
     await waitFor(() => expect(sent).toMatchObject([{ hold: { kind: 'power', power: 0.9 } }]));
+  });
+
+  it('keeps what was typed through a reload and a lost session, until it is held or cancelled', async () => {
+    const fixture = greenkettle();
+    const first = await openWeigh(fixture);
+    await first.user.click(screen.getByRole('button', { name: 'Change what is held' }));
+    await first.user.click(screen.getByRole('radio', { name: /^Budget:/ }));
+    await first.user.type(screen.getByLabelText('Budget'), '700,000');
+    cleanup();
+    const second = await openWeigh(fixture);
+    await second.user.click(screen.getByRole('button', { name: 'Change what is held' }));
+    expect(screen.getByLabelText('Budget')).toHaveValue('700,000');
+    await second.user.clear(screen.getByLabelText('Power'));
+    await second.user.type(screen.getByLabelText('Power'), '90');
+    const dialog = () => within(screen.getByRole('dialog', { name: 'What is kept equal' }));
+    await loseTheSession('design-set', () =>
+      second.user.click(dialog().getByRole('button', { name: 'Hold' })),
+    );
+    const { user } = await openWeigh(fixture);
+    const sent = takes(fixture, 'design-set');
+    await user.click(screen.getByRole('button', { name: 'Change what is held' }));
+    expect(screen.getByRole('radio', { name: /^Budget:/ })).toBeChecked();
+    expect(screen.getByLabelText('Power')).toHaveValue('90');
+    await user.click(dialog().getByRole('button', { name: 'Hold' }));
+    await waitFor(() => expect(screen.queryByRole('dialog')).not.toBeInTheDocument());
+    expect(sent).toMatchObject([{ hold: { kind: 'budget', power: 0.9, budget: 700_000 } }]);
+    expect(sessionStorage).toHaveLength(0);
+    await user.click(screen.getByRole('button', { name: 'Change what is held' }));
+    await user.type(screen.getByLabelText('Power'), '9');
+    expect(sessionStorage).toHaveLength(1);
+    await user.click(dialog().getByRole('button', { name: 'Cancel' }));
+    await user.click(screen.getByRole('button', { name: 'Change what is held' }));
+    expect(screen.getByLabelText('Power')).toHaveValue('90');
   });
 
   it('keeps sizes as entered, and says where none is', async () => {

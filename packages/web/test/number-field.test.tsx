@@ -15,12 +15,12 @@ const anyNumber = z.number().or(z.undefined());
 function Example(
   props: Partial<NumberFieldProps<Values>> & {
     schema?: z.ZodType<number | undefined, number | undefined>;
-    start?: number;
+    start?: number | string;
   },
 ) {
   const { schema = anyNumber, start, ...rest } = props;
   const form = useForm<Values>({
-    defaultValues: { value: start },
+    defaultValues: { value: start as number },
     resolver: zodResolver(z.object({ value: schema })),
     mode: 'onChange',
   });
@@ -141,7 +141,17 @@ describe('The number field', () => {
     expect(await screen.findByText(/“twelve” is not a number/)).toBeVisible();
     expect(field()).toBeInvalid();
     expect(field()).toHaveValue('twelve');
-    expect(keptValue()).toBe('NaN');
+    expect(keptValue()).toBe('twelve');
+  });
+
+  it('shows text that was kept and is no number again, and says so', async () => {
+    const user = show({ start: 'twelve', kind: 'percent' });
+    expect(field()).toHaveValue('twelve');
+    expect(screen.getByText(/“twelve” is not a number/)).toBeVisible();
+    await user.clear(field());
+    await user.type(field(), '12');
+    expect(field()).toBeValid();
+    expect(keptValue()).toBe('0.12');
   });
 
   it('works an expression out, says what it comes to and keeps it as typed', async () => {

@@ -2,6 +2,7 @@ import type { OptionView } from '@steelyard/api/contract/design-sets';
 import { screen, waitFor, within } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
 import { describe, expect, it } from 'vitest';
+import { useDrafts } from '../src/features/designs/model/drafts';
 import { greenkettle } from './fixtures/greenkettle';
 import { nimblegrip } from './fixtures/nimblegrip';
 import { id, type StudyFixture } from './fixtures/study-fixture';
@@ -77,6 +78,30 @@ describe('An option’s form', () => {
     );
     openApp(`/studies/${fixture.study.id}/weigh`);
     expect(await screen.findByLabelText('Girls in each catchment')).toHaveValue('40');
+  });
+
+  it('keeps text that is no number through a reload, says so and stores nothing of it', async () => {
+    const fixture = greenkettle();
+    const first = await openWeigh(fixture);
+    await resize(first.user, 'sixty');
+    await first.user.clear(form().getByLabelText('Usual canteen'));
+    await first.user.type(form().getByLabelText('Usual canteen'), 'half');
+    await first.user.click(form().getByRole('button', { name: 'Override ICC' }));
+    await first.user.type(form().getByLabelText('ICC, here'), 'low');
+    document.body.replaceChildren();
+    await useDrafts.persist.rehydrate();
+    const { user } = await openWeigh(fixture);
+    const sent = storesOptions(fixture);
+    for (const [label, text] of [
+      ['Girls in each catchment', 'sixty'],
+      ['Usual canteen', 'half'],
+      ['ICC, here', 'low'],
+    ] as const) {
+      expect(form().getByLabelText(label)).toHaveValue(text);
+      expect(form().getByText(new RegExp(`^“${text}” is not a number`))).toBeVisible();
+    }
+    await user.click(save());
+    expect(sent).toEqual([]);
   });
 
   it('discards edits on request', async () => {

@@ -7,9 +7,13 @@ const grouped = new Intl.NumberFormat('en-GB', { maximumFractionDigits: 2 });
 const isGrouped = (kind: NumberKind): boolean => kind === 'whole' || kind === 'money';
 const scaleOf = (kind: NumberKind): number => (kind === 'percent' ? 100 : 1);
 
+/** What a number field holds: its number, its text while that is no number, nothing while it is empty. */
+export type Held = number | string | undefined;
+
 /** A kept value as the field shows it: 0.125 as “12.5” in a percent field, 800000 as “800,000” in one for money. */
-export function textOf(value: number | null | undefined, kind: NumberKind): string {
-  if (value === null || value === undefined || Number.isNaN(value)) return '';
+export function textOf(value: Held | null, kind: NumberKind): string {
+  if (value === null || value === undefined) return '';
+  if (typeof value === 'string') return value;
   const format = isGrouped(kind) && Math.abs(value) < 1e15 ? grouped : plain;
   return format.format(value * scaleOf(kind));
 }

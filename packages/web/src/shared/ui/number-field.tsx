@@ -3,6 +3,7 @@ import { useEffect, useId, useRef, useState } from 'react';
 import { type Control, type FieldPath, type FieldValues, useController } from 'react-hook-form';
 import {
   bareText,
+  type Held,
   inUnitShown,
   kept,
   type NumberKind,
@@ -40,7 +41,7 @@ export interface NumberFieldProps<Values extends FieldValues> {
 
 /**
  * The field for every number. Its form value is the number as it is kept (a proportion for a percent), `undefined`
- * while it is empty and NaN while it is no number.
+ * while it is empty and the text itself while that is no number, so that whatever keeps the form's values keeps it.
  */
 export function NumberField<Values extends FieldValues>(props: NumberFieldProps<Values>) {
   const { label, kind = 'number', control, name, hint, beside, disabled } = props;
@@ -49,8 +50,9 @@ export function NumberField<Values extends FieldValues>(props: NumberFieldProps<
   const unitId = useId();
   const { field, fieldState } = useController({ control, name });
   const [text, setText] = useState(() => textOf(field.value, kind));
-  const [left, setLeft] = useState(false);
-  const typed = useRef({ text, value: field.value as number | undefined });
+  const typed = useRef({ text, value: field.value as Held });
+  // Text that is no number already was typed before.
+  const [left, setLeft] = useState(typeof typed.current.value === 'string');
 
   // After a reset, or a value set from elsewhere, what was typed no longer stands for it. The controller's own value
   // will not do: for an emptied field it may fall back on the default.
@@ -61,7 +63,7 @@ export function NumberField<Values extends FieldValues>(props: NumberFieldProps<
     setText(typed.current.text);
   });
 
-  const take = (nextText: string, value: number | undefined) => {
+  const take = (nextText: string, value: Held) => {
     typed.current = { text: nextText, value };
     setText(nextText);
     field.onChange(value);
@@ -70,9 +72,9 @@ export function NumberField<Values extends FieldValues>(props: NumberFieldProps<
   const read = (nextText: string) => {
     setLeft(false);
     const bare = bareText(nextText, kind, unit);
-    const value = bare === '' ? undefined : (plainValue(bare, kind) ?? Number.NaN);
+    const value = bare === '' ? undefined : (plainValue(bare, kind) ?? nextText);
     take(nextText, value);
-    if (!Number.isNaN(value)) return;
+    if (typeof value !== 'string') return;
     void import('./number-field-expression').then(({ valueOfExpression }) => {
       const found = valueOfExpression(bare);
       // More may have been typed while the parser was on its way.
@@ -89,7 +91,7 @@ export function NumberField<Values extends FieldValues>(props: NumberFieldProps<
     setText(tidied);
   };
 
-  const noNumber = text.trim() !== '' && Number.isNaN(typed.current.value);
+  const noNumber = typeof typed.current.value === 'string';
   const isExpression = !noNumber && plainValue(bareText(text, kind, unit), kind) === undefined;
   const complaint = noNumber
     ? (left || fieldState.error) && `“${text.trim()}” is not a number. Enter one such as ${examples[kind]}.`
@@ -126,8 +128,8 @@ export function NumberField<Values extends FieldValues>(props: NumberFieldProps<
         onBlur={tidy}
         onKeyDown={(event) => {
           const { value } = typed.current;
-          if (!(event.key === 'ArrowUp' || event.key === 'ArrowDown') || value === undefined) return;
-          if (Number.isNaN(value) || isExpression) return;
+          if (!(event.key === 'ArrowUp' || event.key === 'ArrowDown')) return;
+          if (typeof value !== 'number' || isExpression) return;
           event.preventDefault();
           const next = stepped(value, kind, event.key === 'ArrowUp' ? 1 : -1);
           take(textOf(next, kind), next);
@@ -137,8 +139,8 @@ export function NumberField<Values extends FieldValues>(props: NumberFieldProps<
   );
 }
 
-const valueAt = (values: FieldValues, name: string): number | undefined =>
-  name.split('.').reduce<FieldValues | undefined>((part, key) => part?.[key], values) as number | undefined;
+const valueAt = (values: FieldValues, name: string): Held =>
+  name.split('.').reduce<FieldValues | undefined>((part, key) => part?.[key], values) as Held;
 
 const examples: Record<NumberKind, string> = {
   number: '12.5 or √3',
@@ -147,5 +149,5 @@ const examples: Record<NumberKind, string> = {
   money: '490,000',
 };
 
-const roundedForReading = (value: number | undefined): number | undefined =>
-  value === undefined ? undefined : Number(value.toPrecision(5));
+const roundedForReading = (value: Held): Held =>
+  typeof value === 'number' ? Number(value.toPrecision(5)) : value;

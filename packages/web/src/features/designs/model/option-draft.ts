@@ -63,6 +63,33 @@ export function cleaned({ name, plan }: OptionDraft): OptionDraft {
   };
 }
 
+/** What a number field holds, as a number: NaN for text that is none. */
+const numeric = <Value>(held: Value): Value | number => (typeof held === 'string' ? Number.NaN : held);
+
+/** A form's values as an option that can be weighed while it is typed. */
+export function weighable(draft: OptionDraft): OptionDraft {
+  const { name, plan } = cleaned(draft);
+  const { units, clusterSize, repeated, overrides, structure, ...rest } = plan;
+  const { allocation } = structure;
+  return {
+    name,
+    plan: {
+      ...rest,
+      structure: Array.isArray(allocation)
+        ? { ...structure, allocation: allocation.map(numeric) }
+        : structure,
+      ...(units === undefined ? {} : { units: numeric(units) }),
+      ...(clusterSize === undefined ? {} : { clusterSize: numeric(clusterSize) }),
+      ...(repeated && {
+        repeated: { baselines: numeric(repeated.baselines), followUps: numeric(repeated.followUps) },
+      }),
+      overrides: Object.fromEntries(
+        Object.entries(overrides).map(([key, { value, reason }]) => [key, { value: numeric(value), reason }]),
+      ),
+    },
+  };
+}
+
 /** Where two versions of an option differ, in words a person can compare. */
 export function differences(
   mine: OptionDraft,

@@ -31,7 +31,7 @@ function leaves(value: unknown): Map<string, string> {
   return new Map(
     leafPaths(value).flatMap((path) => {
       const leaf = at(path);
-      const absent = leaf === undefined || leaf === null || leaf === '' || Number.isNaN(leaf);
+      const absent = leaf === undefined || leaf === null || leaf === '';
       return absent ? [] : [[path, String(leaf)] as const];
     }),
   );

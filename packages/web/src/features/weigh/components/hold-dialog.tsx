@@ -1,11 +1,14 @@
 import { Button, makeStyles, Radio, RadioGroup } from '@fluentui/react-components';
 import { zodResolver } from '@hookform/resolvers/zod';
 import { type Hold, holdSchema } from '@steelyard/calc';
+import { useQuery } from '@tanstack/react-query';
 import { Controller, useForm } from 'react-hook-form';
 import { useChange } from '../../../shared/api/use-change';
 import { DialogBox } from '../../../shared/ui/dialog-box';
 import { Form } from '../../../shared/ui/form';
 import { NumberField } from '../../../shared/ui/number-field';
+import { dropValues, keptValues, useKeptValues } from '../../../shared/ui/use-kept-values';
+import { sessionQuery } from '../../access/api/access';
 import { putDesignSet } from '../../designs/api/design-set';
 import { holdInWords } from '../model/hold-words';
 import type { Weighing } from '../model/weighing';
@@ -31,8 +34,9 @@ export function HoldDialog({ weighing, onClose }: { weighing: Weighing; onClose:
   const styles = useStyles();
   const { study, designSet, hold, limits, currency } = weighing;
   const { change, fault, stale, busy } = useChange(study.id);
-  const { control, handleSubmit, watch } = useForm<HoldForm, unknown, Hold>({
-    defaultValues: {
+  const key = `steelyard-hold/${useQuery(sessionQuery()).data?.id}/${study.id}`;
+  const form = useForm<HoldForm, unknown, Hold>({
+    defaultValues: keptValues<HoldForm>(key) ?? {
       kind: hold.kind,
       power: hold.power,
       budget: hold.kind === 'budget' ? hold.budget : limits.limits.money,
@@ -43,6 +47,8 @@ export function HoldDialog({ weighing, onClose }: { weighing: Weighing; onClose:
       return zodResolver<HoldForm, unknown, Hold>(holdSchema as never)(asked, context, options);
     },
   });
+  useKeptValues(form, key);
+  const { control, handleSubmit, watch } = form;
   const kind = watch('kind');
   return (
     <DialogBox title="What is kept equal" onClose={onClose}>
@@ -58,7 +64,9 @@ export function HoldDialog({ weighing, onClose }: { weighing: Weighing; onClose:
             void handleSubmit(async (next) => {
               const order = designSet.options.map(({ id }) => id);
               const body = { version: designSet.version, hold: next, order };
-              if (await change(() => putDesignSet(study.id, body))) close();
+              if (!(await change(() => putDesignSet(study.id, body)))) return;
+              dropValues(key);
+              close();
             })()
           }
         >
@@ -88,7 +96,14 @@ export function HoldDialog({ weighing, onClose }: { weighing: Weighing; onClose:
             <NumberField label="Budget" kind="money" unit={currency} control={control} name="budget" />
           )}
           <div className={styles.actions}>
-            <Button onClick={close}>Cancel</Button>
+            <Button
+              onClick={() => {
+                dropValues(key);
+                close();
+              }}
+            >
+              Cancel
+            </Button>
             <Button type="submit" appearance="primary" disabledFocusable={busy}>
               Hold
             </Button>

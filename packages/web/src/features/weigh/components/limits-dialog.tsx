@@ -1,6 +1,7 @@
 import { Button, makeStyles, tokens } from '@fluentui/react-components';
 import { zodResolver } from '@hookform/resolvers/zod';
 import { type LimitKey, type Limits, limitsSchema } from '@steelyard/calc';
+import { useQuery } from '@tanstack/react-query';
 import { useEffect } from 'react';
 import { useForm } from 'react-hook-form';
 import { useChange } from '../../../shared/api/use-change';
@@ -8,6 +9,8 @@ import { capitalised, list } from '../../../shared/format/lists';
 import { DialogBox } from '../../../shared/ui/dialog-box';
 import { Form } from '../../../shared/ui/form';
 import { NumberField } from '../../../shared/ui/number-field';
+import { dropValues, keptValues, useKeptValues } from '../../../shared/ui/use-kept-values';
+import { sessionQuery } from '../../access/api/access';
 import { putLimits } from '../../designs/api/design-set';
 import { limitChips } from '../model/standing-words';
 import type { Weighing } from '../model/weighing';
@@ -29,10 +32,13 @@ export function LimitsDialog({ weighing, first, onClose }: LimitsDialogProps) {
   const styles = useStyles();
   const { study, limits, currency } = weighing;
   const { change, fault, stale, busy } = useChange(study.id);
-  const { control, handleSubmit, setFocus } = useForm<Limits>({
-    defaultValues: limits.limits,
+  const key = `steelyard-limits/${useQuery(sessionQuery()).data?.id}/${study.id}`;
+  const form = useForm<Limits>({
+    defaultValues: keptValues<Limits>(key) ?? limits.limits,
     resolver: zodResolver(limitsSchema),
   });
+  useKeptValues(form, key);
+  const { control, handleSubmit, setFocus } = form;
   const clusters = study.clusters;
   const now = limitChips(weighing).map(({ says }) => says);
   const told = stale
@@ -46,7 +52,10 @@ export function LimitsDialog({ weighing, first, onClose }: LimitsDialogProps) {
           fault={told}
           onSubmit={() =>
             void handleSubmit(async (next) => {
-              if (await change(() => putLimits(study.id, { version: limits.version, limits: next }))) close();
+              const body = { version: limits.version, limits: next };
+              if (!(await change(() => putLimits(study.id, body)))) return;
+              dropValues(key);
+              close();
             })()
           }
         >
@@ -71,7 +80,14 @@ export function LimitsDialog({ weighing, first, onClose }: LimitsDialogProps) {
           <NumberField label="Money" kind="money" unit={currency} control={control} name="money" />
           <NumberField label="Months" unit="months" control={control} name="months" />
           <div className={styles.actions}>
-            <Button onClick={close}>Cancel</Button>
+            <Button
+              onClick={() => {
+                dropValues(key);
+                close();
+              }}
+            >
+              Cancel
+            </Button>
             <Button type="submit" appearance="primary" disabledFocusable={busy}>
               Set the limits
             </Button>

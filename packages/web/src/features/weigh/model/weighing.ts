@@ -6,7 +6,7 @@ import { capitalised } from '../../../shared/format/lists';
 import { thinly } from '../../../shared/format/spaces';
 import type { StudyWords } from '../../designs/families/family-ui';
 import type { KeptDraft } from '../../designs/model/drafts';
-import { cleaned } from '../../designs/model/option-draft';
+import { weighable } from '../../designs/model/option-draft';
 
 /** One option with all that is shown of it; its name and plan are those of the person's draft where there is one. */
 export interface Weighed extends Omit<WeighedOption, 'ruling'> {
@@ -45,7 +45,7 @@ export function weighingOf({ study, ledger, costs, designSet, limits, draftOf }:
   const { hold } = designSet;
   const shown = designSet.options.map((stored) => {
     const draft = draftOf(stored.id);
-    return { stored, draft, ...(draft ? cleaned(draft) : { name: stored.name, plan: stored.plan }) };
+    return { stored, draft, ...(draft ? weighable(draft) : { name: stored.name, plan: stored.plan }) };
   });
   const weighed = weigh({
     question: study.plan,
