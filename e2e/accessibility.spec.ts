@@ -34,14 +34,85 @@ async function expectAccessible(page: Page, widths: readonly number[] = [1440, 3
 async function settled(page: Page): Promise<void> {
   await page.evaluate(async () => {
     const frame = () => new Promise((resolve) => requestAnimationFrame(resolve));
-    for (let still = 0; still < 5; still = document.getAnimations().length === 0 ? still + 1 : 0)
-      await frame();
+    // In what is folded away a fading stays on the list after its end.
+    const moves = () => document.getAnimations().some(({ playState }) => playState !== 'finished');
+    for (let still = 0; still < 5; still = moves() ? 0 : still + 1) await frame();
   });
 }
+
+test.describe.configure({ mode: 'parallel' });
 
 test('the sign-in page', async ({ page }) => {
   await page.goto('/sign-in');
   await expect(page.getByRole('button', { name: /Tomas Arrivel/ })).toBeVisible();
+  await expectAccessible(page);
+});
+
+test.describe('for those who make a study', () => {
+  test.beforeEach(async ({ signIn }) => signIn('Jun Oyelaran'));
+
+  const pages = [
+    { path: 'question', heading: 'Question', holds: ['form', 'Question'] },
+    { path: 'ledger', heading: 'Ledger', holds: ['list', 'Planning values'] },
+    { path: 'costs', heading: 'Costs', holds: ['form', 'Costs and accrual'] },
+    { path: 'members', heading: 'Members', holds: ['form', 'Add a member'] },
+    { path: 'history', heading: 'History', holds: ['list', 'Changes'] },
+  ] as const;
+  for (const { path, heading, holds } of pages) {
+    test(`the ${path} of a study`, async ({ page }) => {
+      await page.goto(`/studies/${await studyId(page, 'Greenkettle')}/${path}`);
+      await expect(page.getByRole('heading', { level: 1, name: heading })).toBeVisible();
+      const [role, name] = holds;
+      await expect(page.getByRole(role, { name })).toBeVisible();
+      await expectAccessible(page);
+    });
+  }
+
+  test('a planning value being set, with what it does to the options', async ({ page }) => {
+    await page.goto(`/studies/${await studyId(page, 'Greenkettle')}/ledger`);
+    await page.getByRole('button', { name: 'Change ICC' }).click();
+    const form = page.getByRole('form', { name: 'Set ICC' });
+    await form.getByLabel('Value').fill('0.05');
+    await form.getByLabel('Source').clear();
+    await form.getByLabel('Source').blur();
+    await expect(form.getByRole('alert')).toBeVisible();
+    await expect(form.getByRole('table')).toBeVisible();
+    await page.getByRole('button', { name: 'History of ICC' }).click();
+    await expect(page.getByRole('table', { name: 'History of ICC' })).toBeVisible();
+    await expectAccessible(page);
+  });
+
+  test('limits, a ruling and a dialog over them', async ({ page }) => {
+    await page.goto(`/studies/${await studyId(page, 'Greenkettle')}/weigh`);
+    await expect(page.getByText('Ruled out by Jun Oyelaran')).toBeVisible();
+    await expectAccessible(page);
+    await page.getByRole('button', { name: 'Record the choice' }).click();
+    const dialog = page.getByRole('dialog', { name: 'Record the choice' });
+    await dialog.getByRole('button', { name: 'Record the choice' }).click();
+    await expect(dialog.getByText('Say why this option')).toBeVisible();
+    await expectAccessible(page);
+  });
+
+  test('a new study', async ({ page }) => {
+    await page.goto('/studies/new');
+    const form = page.getByRole('form', { name: 'New study' });
+    await form.getByRole('button', { name: 'Start weighing' }).click();
+    await expect(form.getByRole('alert').first()).toBeVisible();
+    await expectAccessible(page);
+  });
+
+  test('the profile', async ({ page }) => {
+    await page.goto('/profile');
+    await expect(page.getByRole('heading', { level: 1, name: 'Profile' })).toBeVisible();
+    await expectAccessible(page);
+  });
+});
+
+test('the people, for the administrator', async ({ page, signIn }) => {
+  await signIn('Sable Wexley');
+  await page.goto('/admin');
+  await expect(page.getByRole('form', { name: 'Add a person' })).toBeVisible();
+  await expect(page.getByText('Tomas Arrivel').first()).toBeVisible();
   await expectAccessible(page);
 });
 

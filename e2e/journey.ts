@@ -1,4 +1,4 @@
-import { test as base, type Cookie, expect, type Page } from '@playwright/test';
+import { type BrowserContext, test as base, type Cookie, expect, type Page } from '@playwright/test';
 import { ScratchServer } from '../scripts/lib/scratch-server.mjs';
 
 export { expect };
@@ -20,6 +20,8 @@ interface JourneyFixtures {
   signIn(name: string): Promise<void>;
   /** What went wrong on any page of the journey: console and script errors, requests to another origin. */
   faults: string[];
+  /** A page in a second browser, which shares nothing with the first but the server. */
+  elsewhere: Page;
 }
 
 interface WorkerFixtures {
@@ -45,12 +47,18 @@ export const test = base.extend<JourneyFixtures, WorkerFixtures>({
   faults: [
     async ({ context }, use) => {
       const faults: string[] = [];
-      context.on('page', (page) => watch(page, faults));
+      watchAll(context, faults);
       await use(faults);
       expect(faults, 'faults seen on the pages').toEqual([]);
     },
     { auto: true },
   ],
+  elsewhere: async ({ browser, faults, baseURL }, use) => {
+    const context = await browser.newContext({ ...(baseURL ? { baseURL } : {}) });
+    watchAll(context, faults);
+    await use(await context.newPage());
+    await context.close();
+  },
   signIn: async ({ context, sessions, baseURL }, use) => {
     await use(async (name) => {
       const known = sessions.get(name);
@@ -65,6 +73,10 @@ export const test = base.extend<JourneyFixtures, WorkerFixtures>({
     });
   },
 });
+
+function watchAll(context: BrowserContext, faults: string[]): void {
+  context.on('page', (page) => watch(page, faults));
+}
 
 function watch(page: Page, faults: string[]): void {
   page.on('pageerror', (error) => faults.push(error.message));
@@ -88,6 +100,12 @@ export async function studyId(page: Page, name: string): Promise<string> {
   const study = studies.find((candidate) => candidate.name === name);
   if (!study) throw new Error(`${name} is not among the studies`);
   return study.id;
+}
+
+/** Signs in through the page, by the demo's strip. */
+export async function enter(page: Page, name: string): Promise<void> {
+  await page.getByRole('button', { name: new RegExp(name) }).click();
+  await expect(page.getByRole('button', { name: `Account: ${name}` })).toBeVisible();
 }
 
 /** Takes the faults that a journey provokes off the list; there must be such, and any others stay. */

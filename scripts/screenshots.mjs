@@ -9,6 +9,7 @@ import { ScratchServer } from './lib/scratch-server.mjs';
 
 const widths = { 1440: 900, 1024: 768, 390: 844 };
 const visitor = { study: 'Stillfoot', part: 'Methodologist, Stillfoot' };
+const administrator = 'Administrator';
 
 /** Where each picture is taken, from what the server says of the study. */
 const screens = {
@@ -16,7 +17,15 @@ const screens = {
   studies: () => '/',
   weigh: (study) => `/studies/${study}/weigh`,
   working: (study, options) => `/studies/${study}/options/${options[0].optionId}`,
+  question: (study) => `/studies/${study}/question`,
+  ledger: (study) => `/studies/${study}/ledger`,
+  costs: (study) => `/studies/${study}/costs`,
+  members: (study) => `/studies/${study}/members`,
+  history: (study) => `/studies/${study}/history`,
+  'new-study': () => '/studies/new',
+  profile: () => '/profile',
   'not-found': () => '/no/such/page',
+  people: () => '/admin',
 };
 
 await runScript(async () => {
@@ -41,7 +50,8 @@ async function takeAll(browser, origin, folder, colorScheme) {
   const page = await context.newPage();
   const addresses = { study: '', options: [] };
   for (const [name, path] of Object.entries(screens)) {
-    if (name === 'studies') Object.assign(addresses, await signIn(context.request));
+    if (name === 'studies') Object.assign(addresses, await visit(context.request));
+    if (name === 'people') await signIn(context.request, administrator);
     await page.goto(path(addresses.study, addresses.options), { waitUntil: 'networkidle' });
     for (const [width, height] of Object.entries(widths)) {
       await page.setViewportSize({ width: Number(width), height });
@@ -53,12 +63,16 @@ async function takeAll(browser, origin, folder, colorScheme) {
   await context.close();
 }
 
-async function signIn(request) {
-  const { demo } = await (await request.get('/api/access')).json();
-  const { email } = demo.accounts.find(({ part }) => part === visitor.part);
-  await request.post('/api/session', { data: { email, password: demo.password } });
+async function visit(request) {
+  await signIn(request, visitor.part);
   const { studies } = await (await request.get('/api/studies')).json();
   const { id } = studies.find(({ name }) => name === visitor.study);
   const { options } = await (await request.get(`/api/studies/${id}/weigh`)).json();
   return { study: id, options };
+}
+
+async function signIn(request, part) {
+  const { demo } = await (await request.get('/api/access')).json();
+  const { email } = demo.accounts.find((account) => account.part === part);
+  await request.post('/api/session', { data: { email, password: demo.password } });
 }
