@@ -94,3 +94,13 @@ test('a planning value moves every option, keeps its history for the reader and 
   await expect(outcome).toBeVisible();
   expect(await weighed(page, id)).toEqual(before);
 });
+
+test('the first click on Save tells of a field left empty and goes to it', async ({ page, signIn }) => {
+  await signIn(stillfoot.methodologist);
+  await page.goto(`/studies/${await studyId(page, 'Stillfoot')}/ledger`);
+  await setStandardDeviation(page, '2.5', '');
+  const form = page.getByRole('form', { name: 'Set Standard deviation' });
+  await form.getByRole('button', { name: 'Save' }).click();
+  await expect(form.getByText('Say where the value comes from.')).toBeVisible();
+  await expect(form.getByLabel('Source')).toBeFocused();
+});

@@ -68,7 +68,6 @@ export function useKeptForm<Values extends FieldValues, Body, View extends Versi
   const form = useForm<Values>({
     defaultValues: (begun ? valuesOfText(begun.text) : stored) as DefaultValues<Values>,
     resolver,
-    mode: 'onTouched',
   });
   const values = form.watch();
   const text = textOfValues(values);
