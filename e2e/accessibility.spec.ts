@@ -74,7 +74,7 @@ test.describe('for those who make a study', () => {
     const form = page.getByRole('form', { name: 'Set ICC' });
     await form.getByLabel('Value').fill('0.05');
     await form.getByLabel('Source').clear();
-    await form.getByLabel('Source').blur();
+    await form.getByRole('button', { name: 'Save' }).click();
     await expect(form.getByRole('alert')).toBeVisible();
     await expect(form.getByRole('table')).toBeVisible();
     await page.getByRole('button', { name: 'History of ICC' }).click();
