@@ -39,7 +39,7 @@ function isRecord(value: unknown): value is Record<string, unknown> {
   return typeof value === 'object' && value !== null;
 }
 
-test('ten appraisals agree between the browser and the server', async ({ page, signIn }) => {
+test('appraisals of every family agree between the browser and the server', async ({ page, signIn }) => {
   await page.addInitScript({ content: await calcScript() });
   await signIn(stillfoot.methodologist);
   await page.goto('/');

@@ -1,7 +1,7 @@
 import type { Locator, Page } from '@playwright/test';
 import { ScratchServer } from '../scripts/lib/scratch-server.mjs';
 import { enter, expect, test } from './journey.js';
-import { figuresShown } from './options-table.js';
+import { beamsCard, figuresShown } from './options-table.js';
 
 const person = 'Tomas Arrivel';
 const question = 'Does a daily walk on the ward shorten the days to safe discharge by 5?';
@@ -142,14 +142,16 @@ test('a study made from nothing is weighed, limited, ruled on and settled, and o
       await expect(page).toHaveURL(/\/studies\/[^/]+\/weigh$/);
       await expect(page.getByRole('heading', { level: 1 })).toHaveText(question);
       await expect(options(page).getByRole('row')).toHaveCount(2);
-      const beam = rowOf(page, 'A Parallel').getByRole('img', { name: /^Cost by arm/ });
+      const beam = rowOf(page, 'A Parallel').getByRole('button', { name: /^Cost by arm/ });
       await expect(beam).toHaveAccessibleName(/No walk 114.k€, Daily walk 114.k€/);
     });
 
     await test.step('an option of each family joins it', async () => {
       await widenQuestion(page);
       await addOption(page, 'Parallel', 'B');
-      const form = page.getByRole('region', { name: 'Option B' }).getByRole('form', { name: 'Option' });
+      const panel = page.getByRole('region', { name: 'Option B' });
+      await panel.getByRole('button', { name: 'Edit' }).click();
+      const form = panel.getByRole('form', { name: 'Option' });
       await form.getByRole('textbox', { name: 'Name', exact: true }).fill('Adjusted for the first week');
       await form.getByLabel(/^Measured more than once/).check();
       await form.getByRole('button', { name: 'Save' }).click();
@@ -165,12 +167,12 @@ test('a study made from nothing is weighed, limited, ruled on and settled, and o
     });
 
     await test.step('the cost of every arm is told', async () => {
-      await page.getByRole('button', { name: 'Table' }).click();
+      await beamsCard(page).getByRole('button', { name: 'Table' }).click();
       const shown = await figuresShown(page);
       expect(
         shown.map((row) => [row.name, row.analysed, row.recruited, row.money, row.months, row.byArm]),
       ).toEqual(expected);
-      await page.getByRole('button', { name: 'Table' }).click();
+      await beamsCard(page).getByRole('button', { name: 'Table' }).click();
     });
 
     await test.step('limits are set, one option is ruled out and another chosen', async () => {

@@ -4,11 +4,11 @@ import { expect, test } from './journey.js';
 /** Presses Tab until the focus is there, as a person without a mouse does. */
 async function tabTo(page: Page, target: Locator): Promise<void> {
   await expect(target).toBeVisible();
-  for (let presses = 0; presses < 40; presses += 1) {
+  for (let presses = 0; presses < 80; presses += 1) {
     await page.keyboard.press('Tab');
     if (await target.evaluate((element) => element === document.activeElement)) return;
   }
-  throw new Error(`40 presses of Tab did not reach ${target}`);
+  throw new Error(`80 presses of Tab did not reach ${target}`);
 }
 
 test('the keyboard alone signs in, reaches the second option and opens its working', async ({ page }) => {

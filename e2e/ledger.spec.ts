@@ -1,6 +1,6 @@
 import type { Page } from '@playwright/test';
 import { expect, stillfoot, studyId, test } from './journey.js';
-import { figuresShown } from './options-table.js';
+import { beamsCard, figuresShown } from './options-table.js';
 
 /**
  * Analysed and recruited at power 90 %, from noncentral t in R: at a standard deviation of 2.1, as the demo states it,
@@ -23,7 +23,7 @@ const register = 'Register of 412 outpatients, 2019 to 2024';
 /** What Weigh shows, by option. */
 async function weighed(page: Page, id: string) {
   await page.goto(`/studies/${id}/weigh`);
-  await page.getByRole('button', { name: 'Table' }).click();
+  await beamsCard(page).getByRole('button', { name: 'Table' }).click();
   return figuresShown(page);
 }
 

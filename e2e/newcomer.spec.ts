@@ -1,5 +1,5 @@
 import { expect, stillfoot, studyId, test } from './journey.js';
-import { figuresShown } from './options-table.js';
+import { beamsCard, figuresShown } from './options-table.js';
 
 /** What the demo's design says of Stillfoot at power 90 %: money to the nearest 1 000 EUR, whole months. */
 const expected = [
@@ -43,7 +43,7 @@ test('a newcomer signs in through the demo, sees Stillfoot weighed, opens a work
     await expect(row.getByRole('cell', { name: months, exact: true })).toBeVisible();
   }
 
-  await page.getByRole('button', { name: 'Table' }).click();
+  await beamsCard(page).getByRole('button', { name: 'Table' }).click();
   const shown = await figuresShown(page);
   expect(
     shown.map(({ power, byArm, money, months, ...exact }) => ({
@@ -77,7 +77,7 @@ test('the page, which computes for itself, shows what the server answers', async
   await signIn(stillfoot.methodologist);
   const id = await studyId(page, 'Stillfoot');
   await page.goto(`/studies/${id}/weigh`);
-  await page.getByRole('button', { name: 'Table' }).click();
+  await beamsCard(page).getByRole('button', { name: 'Table' }).click();
   const { options }: Weighed = await (await page.request.get(`/api/studies/${id}/weigh`)).json();
   expect(options).toHaveLength(3);
   const rounded = (value: number, places: number) => Number(value.toFixed(places));

@@ -1,4 +1,4 @@
-import type { Page } from '@playwright/test';
+import type { Locator, Page } from '@playwright/test';
 
 export interface Shown {
   name: string;
@@ -9,6 +9,9 @@ export interface Shown {
   months: number;
   byArm: string;
 }
+
+/** The card of beams, which can also be read as a table. */
+export const beamsCard = (page: Page): Locator => page.getByRole('region', { name: 'Options side by side' });
 
 /** The options' figures as the table on Weigh shows them; the table must have been asked for. */
 export async function figuresShown(page: Page): Promise<Shown[]> {

@@ -2,22 +2,25 @@ import type { Page } from '@playwright/test';
 import { enter, expect, expectFaults, studyId, test } from './journey.js';
 
 const nimblegrip = { methodologist: 'Renske Aalderink', investigator: 'Oona Mackrell' };
-const option = { letter: 'C', name: 'Three arms, larger control, Bonferroni' };
+const option = { letter: 'E', name: 'Three arms, larger control, Dunnett' };
 
 const reason =
   'Two of the practices lost a fifth of those who came for eight sessions; the sheet alone lost hardly anybody.';
 
-/** Opens the option on Weigh and gives the form it is edited in. */
-async function openOption(page: Page) {
+/** Opens the option on Weigh and gives the form it is edited in, which shows by itself where an edit was begun. */
+async function openOption(page: Page, begun = false) {
   await page.goto(`/studies/${await studyId(page, 'Nimblegrip')}/weigh`);
   await page.getByRole('button', { name: new RegExp(`^${option.letter} `) }).click();
+  if (!begun) await edit(page);
   return formOf(page);
 }
 
+const panelOf = (page: Page) => page.getByRole('region', { name: `Option ${option.letter}` });
+
+const edit = (page: Page) => panelOf(page).getByRole('button', { name: 'Edit' }).click();
+
 function formOf(page: Page) {
-  const form = page
-    .getByRole('region', { name: `Option ${option.letter}` })
-    .getByRole('form', { name: 'Option' });
+  const form = panelOf(page).getByRole('form', { name: 'Option' });
   return {
     form,
     name: form.getByLabel('Name', { exact: true }),
@@ -93,8 +96,71 @@ test('of two people who edit one option the later one sees both versions, loses 
   await theirs.save.click();
   await expect(theirs.told).toHaveText('Saved');
   await page.reload();
+  await edit(page);
   await expect(mine.name).toHaveValue(option.name);
   await expect(mine.reason).toHaveValue(reason);
+});
+
+test('limits that were typed and put away do not go over those that somebody else has set meanwhile', async ({
+  page,
+  elsewhere,
+  faults,
+}) => {
+  await page.goto('/');
+  await enter(page, nimblegrip.methodologist);
+  await elsewhere.goto('/');
+  await enter(elsewhere, nimblegrip.investigator);
+  const address = `/studies/${await studyId(page, 'Nimblegrip')}/weigh`;
+  const limitsOn = (browser: Page) => {
+    const dialog = browser.getByRole('dialog', { name: 'Limits' });
+    return {
+      dialog,
+      open: () => browser.getByRole('button', { name: /^≤ \d+ months$/ }).click(),
+      months: dialog.getByLabel('Months'),
+      set: dialog.getByRole('button', { name: 'Set the limits' }),
+      chips: browser.getByRole('list', { name: 'Limits' }),
+    };
+  };
+  const mine = limitsOn(page);
+  const theirs = limitsOn(elsewhere);
+  await page.goto(address);
+  await mine.open();
+  await mine.months.fill('60');
+  await page.keyboard.press('Escape');
+  await expect(mine.dialog).toHaveCount(0);
+
+  await elsewhere.goto(address);
+  await theirs.open();
+  await theirs.months.fill('54');
+  await theirs.set.click();
+  await expect(theirs.chips).toContainText('54 months');
+
+  await page.reload();
+  await expect(mine.chips).toContainText('54 months');
+  await mine.open();
+  await expect(mine.months).toHaveValue('60');
+  await mine.set.click();
+  await expect(mine.dialog.getByRole('alert')).toContainText(nimblegrip.investigator);
+  await expect(mine.dialog.getByRole('row', { name: 'Months 60 54' })).toBeVisible();
+  await expect(mine.months).toHaveValue('60');
+  expectFaults(faults, /status of 409/);
+  await elsewhere.reload();
+  await expect(theirs.chips).toContainText('54 months');
+
+  await mine.dialog.getByRole('button', { name: 'Go on with mine' }).click();
+  await mine.set.click();
+  await expect(mine.dialog).toHaveCount(0);
+  await expect(mine.chips).toContainText('60 months');
+
+  await theirs.open();
+  await theirs.months.fill('48');
+  await theirs.set.click();
+  await expect(theirs.dialog.getByRole('row', { name: 'Months 48 60' })).toBeVisible();
+  expectFaults(faults, /status of 409/);
+  await theirs.dialog.getByRole('button', { name: 'Take theirs' }).click();
+  await expect(theirs.months).toHaveValue('60');
+  await theirs.dialog.getByRole('button', { name: 'Cancel' }).click();
+  await expect(theirs.chips).toContainText('60 months');
 });
 
 test('an edit that is not saved outlives a reload and a session that ends', async ({ page }) => {
@@ -119,6 +185,7 @@ test('an edit that is not saved outlives a reload and a session that ends', asyn
   await save.click();
   await expect(told).toHaveText('Saved');
   await page.reload();
+  await edit(page);
   await expect(name).toHaveValue('Three arms, and a name for them');
   await expect(told).toHaveText('');
 });
@@ -150,7 +217,7 @@ test('a member removed while editing is told so, and finds the edit again once a
   await form.getByRole('radio', { name: /^Investigator/ }).check();
   await form.getByRole('button', { name: 'Add the member' }).click();
   await expect(page.getByRole('button', { name: `Remove ${nimblegrip.investigator}` })).toBeVisible();
-  await openOption(elsewhere);
+  await openOption(elsewhere, true);
   await expect(name).toHaveValue('Three arms, as the practices call them');
   await save.click();
   await expect(told).toHaveText('Saved');

@@ -105,7 +105,7 @@ const faults = [
     '@steelyard/api',
     restricted,
   ],
-  ['a feature imports the app', 'packages/web/src/features/weigh/faulty.ts', '../../app/router', restricted],
+  ['a feature imports the app', 'packages/web/src/features/weigh/faulty.ts', '../../app/pages', restricted],
   [
     'a feature imports the api beyond its contract',
     'packages/web/src/features/weigh/faulty.ts',

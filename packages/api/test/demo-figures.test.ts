@@ -26,7 +26,7 @@ interface Study {
 
 /**
  * Sizes and powers were computed in R from the written formulas, money and months added by hand (to a thousand
- * and to a whole month, where they end in zeros). Nimblegrip's three arms are those of reference/three-arms.R.
+ * and to a whole month, where they end in zeros).
  */
 const studies: Study[] = [
   {
@@ -50,7 +50,7 @@ const studies: Study[] = [
     name: 'Greenkettle',
     methodologist: 'oyelaran',
     aim: 0.8,
-    headline: 'No option fits every limit.',
+    headline: 'Only B fits every limit.',
     figures: [
       {
         option: 'Cluster, end only',
@@ -60,14 +60,32 @@ const studies: Study[] = [
         euro: 715_320,
         months: 17,
       },
+      {
+        option: 'Cluster with baseline',
+        analysed: [1200, 1200],
+        recruited: 2400,
+        power: 0.804,
+        euro: 652_800,
+        months: 20,
+      },
+      {
+        option: 'Stepped wedge, 4 steps',
+        analysed: [625, 625, 625, 625],
+        recruited: 2500,
+        power: 0.852,
+        euro: 819_400,
+        months: 32,
+      },
       { option: 'Individual randomisation', analysed: [296, 296], recruited: 592, ruledOut: true },
+      // By base R: qt, and pt with ncp, at SE = 13·√(2(1 − 0.5)/N) on N − 2 df.
+      { option: 'Crossover', analysed: [75, 75], recruited: 150, power: 0.802, ruledOut: true },
     ],
   },
   {
     name: 'Nimblegrip',
     methodologist: 'aalderink',
     aim: 0.9,
-    headline: 'A and C fit every limit; C costs least, ends first and recruits the fewest participants.',
+    headline: 'A, D and E fit every limit; E costs least, ends first and recruits the fewest participants.',
     figures: [
       {
         option: 'Four equal arms, no adjustment',
@@ -84,11 +102,24 @@ const studies: Study[] = [
         months: 52,
       },
       {
-        option: 'Three arms, larger control, Bonferroni',
-        analysed: [182, 129, 129],
-        recruited: 501,
-        power: 0.901,
-        euro: 583_384,
+        option: 'Four equal arms, Dunnett',
+        analysed: [160, 160, 160, 160],
+        recruited: 728,
+        euro: 696_000,
+        months: 51,
+      },
+      {
+        option: 'Four arms, larger control, Dunnett',
+        analysed: [220, 128, 128, 128],
+        recruited: 688,
+        euro: 664_000,
+        months: 49,
+      },
+      {
+        option: 'Three arms, larger control, Dunnett',
+        analysed: [179, 127, 127],
+        recruited: 494,
+        euro: 580_000,
         months: 40,
       },
     ],
@@ -115,7 +146,7 @@ describe('The demo weighs', () => {
 
       expect(verdict.headline.replaceAll('\u202f', ' ')).toBe(headline);
       expect(options.map(({ letter, name, error }) => [letter, name, error])).toEqual(
-        figures.map(({ option }, place) => ['ABC'.charAt(place), option, null]),
+        figures.map(({ option }, place) => ['ABCDEF'.charAt(place), option, null]),
       );
       for (const [place, { analysed, recruited, power, euro, months, ruledOut }] of figures.entries()) {
         const appraisal = options[place]?.appraisal as unknown as Feasible;
@@ -149,33 +180,48 @@ describe('The demo weighs', () => {
     expect(standing.within).toMatchObject({ clusters: 32, clusterSize: 60 });
     expect(standing.within?.power).toBeCloseTo(0.726, 3);
     expect(verdict.detail).toContain('A needs 12 catchments that do not exist');
-    expect(verdict.detail).toContain('B is ruled out');
-    expect(options[1]?.ruling?.reason).toContain('canteen is shared');
+    expect(verdict.detail).toContain(
+      'C costs 19\u202fk€ too much and ends 2 months late. D and E are ruled out',
+    );
+    expect(options[3]?.ruling?.reason).toContain('canteen is shared');
   });
 
-  test('Greenkettle at sizes as entered: 67.2 % with 40 girls in each of 32 catchments', async () => {
+  test('Greenkettle at sizes as entered', async () => {
     const cookie = await app.signIn(email('doss'));
     const [study] = (await app.get('/api/studies', cookie)).body.studies;
     const room = (path: string) => `/api/studies/${study.id}${path}`;
     const { version, options } = (await app.get(room('/design-set'), cookie)).body as DesignSetView;
-    const [cluster] = options as [OptionView];
-    const sized = { version: cluster.version, name: cluster.name, plan: { ...cluster.plan, units: 16 } };
-    await app.request('put', room(`/options/${cluster.id}`), cookie).send(sized);
+    const [cluster, baseline, wedge] = options as [OptionView, OptionView, OptionView];
+    for (const [option, units] of [
+      [cluster, 16],
+      [baseline, 16],
+      [wedge, 4],
+    ] as const) {
+      const sized = { version: option.version, name: option.name, plan: { ...option.plan, units } };
+      await app.request('put', room(`/options/${option.id}`), cookie).send(sized);
+    }
     const order = options.map(({ id }) => id);
     await app
       .request('put', room('/design-set'), cookie)
       .send({ version, hold: { kind: 'sizes', power: 0.8 }, order });
     const weighed = (await app.get(room('/weigh'), cookie)).body as WeighView;
-    const appraisal = weighed.options[0]?.appraisal as unknown as Feasible;
-    expect(appraisal).toMatchObject({ clusters: 32, clusterSize: 40, measurements: 1280 });
-    expect(appraisal.power).toBeCloseTo(0.672, 3);
+    const [endOnly, withBaseline, stepped] = weighed.options.map(
+      ({ appraisal }) => appraisal as unknown as Feasible,
+    ) as [Feasible, Feasible, Feasible];
+    expect(endOnly).toMatchObject({ clusters: 32, clusterSize: 40, measurements: 1280 });
+    expect(endOnly.power).toBeCloseTo(0.672, 3);
+    expect(withBaseline).toMatchObject({ clusters: 32, measurements: 2560 });
+    expect(withBaseline.power).toBeCloseTo(0.831, 3);
+    expect(withBaseline.costs?.total).toBeCloseTo(674_720, 6);
+    expect(stepped).toMatchObject({ clusters: 16, measurements: 2000 });
+    expect(stepped.power).toBeCloseTo(0.752, 3);
   });
 
   test('with reals of 12 significant digits, and requests as they were computed', async () => {
     const cookie = await app.signIn(email('aalderink'));
     const [study] = (await app.get('/api/studies', cookie)).body.studies;
     const { options } = (await app.get(`/api/studies/${study.id}/weigh`, cookie)).body as WeighView;
-    const [, , threeArms] = options as [unknown, unknown, { request: object; appraisal: Feasible }];
+    const threeArms = options.at(-1) as unknown as { request: object; appraisal: Feasible };
     const { power, standardError } = threeArms.appraisal;
     for (const real of [power, standardError]) expect(real).toBe(Number(real.toPrecision(12)));
     expect(threeArms.request).toMatchObject({ design: { allocation: [Math.SQRT2, 1, 1] } });

@@ -133,6 +133,22 @@ describe('A new study', () => {
     ],
     ['a power of 1', { power: 1 }, 'power'],
     ['clusters without a name', { randomises: 'clusters' }, 'clusters'],
+    [
+      'clusters of ordered categories',
+      {
+        outcome: {
+          kind: 'ordinal',
+          label: 'Scale',
+          unit: '',
+          oddsRatio: 2,
+          controlProbabilities: [0.5, 0.5],
+        },
+        sd: undefined,
+        clusters: { one: 'village', many: 'villages' },
+        randomises: 'clusters',
+      },
+      'randomises',
+    ],
     ['one treatment', { treatments: [{ name: 'Leaflet' }] }, 'treatments'],
     ['no question', { question: '' }, 'question'],
     ['a field that is none', { colour: 'brass' }, 'colour'],

@@ -110,6 +110,22 @@ describe('Options', () => {
     expect((await team.read('/weigh')).options[0].ruling).toEqual(ruling);
   });
 
+  test('come with a ruling from whoever may rule, and from nobody else', async () => {
+    const ruling = { kind: 'conditions', reason: 'Only if delivery in groups turns out to be needed.' };
+    const body = { name: 'Ruled from the start', plan: cluster, ruling };
+    expect((await team.ask('post', '/options', body, 'investigator')).status).toBe(403);
+    expect(
+      (await team.ask('post', '/options', { ...body, ruling: { ...ruling, reason: '' } })).body.issues,
+    ).toMatchObject([{ path: 'ruling.reason' }]);
+    const added = await team.ask('post', '/options', body);
+    expect(added.body).toMatchObject({ version: 1, ruling: { ...ruling, by: 'Jun Oyelaran' } });
+    const history = (await team.read('/history', 'reader')).entries;
+    expect(history.slice(0, 2).map(({ action }: { action: string }) => action)).toEqual([
+      'ruled on',
+      'added',
+    ]);
+  });
+
   test('may be drafts: what a plan lacks is told where it is weighed', async () => {
     const { id } = await add('No size yet', { ...cluster, clusterSize: undefined });
     const weighed = (await team.read('/weigh')).options.find(

@@ -31,7 +31,11 @@ export interface Feasible {
   criticalValue: number;
   df: number | null;
   designEffect?: number;
+  requiredEvents?: number;
+  expectedEvents?: number;
   comparisons: ComparisonResult[];
+  disjunctivePower?: number;
+  conjunctivePower?: number;
   alphaPerComparison?: number;
   costs?: CostSheet;
   timeline?: Timeline;
@@ -84,6 +88,7 @@ export interface Timeline {
 
 export type CautionCode =
   | 'few-clusters'
+  | 'few-clusters-period'
   | 'normal-reference'
   | 'carryover'
   | 'no-washout'
@@ -93,8 +98,11 @@ export type CautionCode =
   | 'multiplicity'
   | 'icc-zero'
   | 'equal-sizes'
+  | 'one-per-sequence'
   | 'completers-only'
   | 'small-ancova'
+  | 'dilution'
+  | 'accrual'
   | 'missing-figure'
   | 'fixed-design'
   | 'random-error'
@@ -119,6 +127,8 @@ export interface CurvePoint {
   size: number;
   power: number;
   detectable?: number;
+  /** Of the first comparison's interval. */
+  expectedHalfWidth: number;
   participants: number;
   clusters?: number;
   cost?: number;

@@ -4,8 +4,9 @@ import { generalCautions } from './cautions.js';
 import { costSheet } from './costs/cost-sheet.js';
 import type { Layout } from './designs/family.js';
 import { type AppraisalRequest, parseRequest } from './parse-request.js';
+import type { TimelinePlan } from './request.js';
 import { type Solution, solve } from './solve.js';
-import { criticalValue } from './tests/superiority.js';
+import { criticalValue } from './tests/one-bound.js';
 import { scheduleOf } from './timeline/timeline.js';
 import { type Totals, totalsOf } from './totals.js';
 
@@ -24,9 +25,14 @@ export function appraise(request: AppraisalRequest): Appraisal {
 }
 
 function feasible(bound: Bound, solution: Solution): Feasible {
-  const { request, plan } = bound;
+  const { request, plan, multiplicity } = bound;
   const { units, clusterSize, outcomes } = solution;
-  const evaluated = solution.evaluated ?? bound.evaluate(plan.groupUnits(units), clusterSize, outcomes);
+  const groupUnits = plan.groupUnits(units);
+  const evaluated = solution.evaluated ?? bound.evaluate(groupUnits, clusterSize, outcomes);
+  const { analysis } = evaluated;
+  const worked = { units, clusterSize, groupUnits, analysis };
+  const events = plan.events?.(worked, outcomes);
+  const joint = multiplicity.joint?.(analysis, evaluated.criticalValue, bound.test);
   const layout = plan.layout(units, clusterSize);
   const totals = totalsOf(layout);
   const { costs, timeline, missing } = moneyAndTime(bound, layout, totals);
@@ -43,7 +49,7 @@ function feasible(bound: Bound, solution: Solution): Feasible {
     standardError,
     expectedHalfWidth,
     criticalValue: evaluated.criticalValue,
-    df: evaluated.analysis.df,
+    df: analysis.df,
     comparisons: comparisonResults(evaluated),
     cautions: [...plan.cautions(layout, outcomes), ...generalCautions(request, outcomes.length, missing)],
   };
@@ -53,8 +59,12 @@ function feasible(bound: Bound, solution: Solution): Feasible {
     clusters: totals.clusters,
     recruitedClusters: totals.recruitedClusters,
     detectable: solution.detectable,
-    designEffect: clusterSize === undefined ? undefined : plan.designEffect?.(clusterSize),
-    alphaPerComparison: plan.comparisons && bound.alphaPerComparison,
+    designEffect: plan.designEffect?.(worked),
+    requiredEvents: events?.required,
+    expectedEvents: events?.expected,
+    disjunctivePower: joint?.disjunctive,
+    conjunctivePower: joint?.conjunctive,
+    alphaPerComparison: plan.comparisons && multiplicity.alphaPerComparison,
     costs,
     timeline,
   });
@@ -71,13 +81,15 @@ function infeasibleCautions(bound: Bound): Caution[] {
 }
 
 /** The first comparison's standard error, and half the width of its unadjusted interval. */
-function precision(
-  { request: { test }, alphaPerComparison }: Bound,
+export function precision(
+  { request: { test }, multiplicity }: Bound,
   { analysis, criticalValue: adjusted }: Evaluated,
 ): Pick<Feasible, 'standardError' | 'expectedHalfWidth'> {
   const standardError = analysis.contrasts[0]?.standardError as number;
   const unadjusted =
-    alphaPerComparison === test.alpha ? adjusted : criticalValue(test.alpha / test.sides, analysis.df);
+    multiplicity.alphaPerComparison === test.alpha
+      ? adjusted
+      : criticalValue(test.alpha / test.sides, analysis.df);
   return { standardError, expectedHalfWidth: unadjusted * standardError };
 }
 
@@ -96,10 +108,11 @@ export function moneyAndTime(
   layout: Layout,
   totals: Totals,
 ): Pick<Feasible, 'costs' | 'timeline'> & { missing: readonly string[] } {
+  if (!request.costs && !request.timeline) return { missing: [] };
   const { recruited } = totals;
   const { recruitedPerCluster } = layout;
   const schedule =
-    request.timeline && scheduleOf(request.timeline, { recruited, recruitedPerCluster }, plan.periods);
+    request.timeline && scheduleOf(timelineOf(request), { recruited, recruitedPerCluster }, plan.periods);
   const missing = schedule?.missing ?? [];
   const months = schedule?.timeline.months;
   const found: ReturnType<typeof moneyAndTime> = {
@@ -113,6 +126,11 @@ export function moneyAndTime(
     timeline: schedule?.timeline,
   });
   return found;
+}
+
+/** A time-to-event outcome brings its own follow-up. */
+function timelineOf({ timeline, outcome }: AppraisalRequest): TimelinePlan {
+  return outcome.kind === 'time-to-event' ? { ...timeline, followUp: outcome.followUp } : { ...timeline };
 }
 
 /** Sets what has a value, so that an answer is the same before and after JSON. */

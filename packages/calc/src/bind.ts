@@ -1,3 +1,4 @@
+import { list } from './comparison/wording.js';
 import { checkCostsByArm } from './costs/cost-sheet.js';
 import type { DesignPlan } from './designs/family.js';
 import { familyOf } from './designs/registry.js';
@@ -5,9 +6,19 @@ import { CalcError } from './errors.js';
 import type { OutcomeModel } from './outcomes/outcome-model.js';
 import { outcomeModel } from './outcomes/registry.js';
 import type { AppraisalRequest } from './parse-request.js';
-import type { Analysis, Contrast } from './tests/analysis.js';
-import { alphaPerComparison } from './tests/multiplicity/per-comparison.js';
-import { criticalValue, noncentralityNeeded, superiorityPower } from './tests/superiority.js';
+import type { OutcomeKind } from './request.js';
+import type { Analysis } from './tests/analysis.js';
+import type { Multiplicity } from './tests/multiplicity/multiplicity.js';
+import { multiplicityFor } from './tests/multiplicity/registry.js';
+import { type SingleTest, singleTest } from './tests/single-test.js';
+
+const outcomeWords: Record<OutcomeKind, string> = {
+  continuous: 'a mean',
+  binary: 'a proportion',
+  'time-to-event': 'a time to an event',
+  count: 'a rate',
+  ordinal: 'ordered categories',
+};
 
 /** A request with its family's formula and its test put together: power at any size follows. */
 export interface Bound {
@@ -15,24 +26,22 @@ export interface Bound {
   plan: DesignPlan;
   /** One per active arm. */
   outcomes: readonly OutcomeModel[];
-  alphaPerComparison: number;
+  test: SingleTest;
+  multiplicity: Multiplicity;
   analyse(groupUnits: readonly number[], clusterSize?: number, outcomes?: readonly OutcomeModel[]): Analysis;
   evaluate(
     groupUnits: readonly number[],
     clusterSize?: number,
     outcomes?: readonly OutcomeModel[],
   ): Evaluated;
-  /** What the statistic of each comparison must exceed. */
-  criticalValue(df: number | null): number;
-  /** The |δ|/SE at which a comparison reaches `power`. */
-  noncentralityNeeded(contrast: Contrast, df: number | null, power: number): number;
 }
 
 export interface Evaluated {
   analysis: Analysis;
+  /** What the statistic of each comparison must exceed. */
   criticalValue: number;
   powers: number[];
-  /** Of the power goal: the smallest over the comparisons. */
+  /** Of the power goal. */
   power: number;
 }
 
@@ -44,15 +53,11 @@ export function bind(request: AppraisalRequest): Bound {
   refuseAim(request, plan);
   if (request.costs) checkCostsByArm(request.costs, plan.arms.length);
 
-  const { comparisons } = plan;
   const active = plan.arms.length - 1;
-  const model = outcomeModel(request.outcome, request.dilution);
-  const outcomes = targets(comparisons?.effects, active, model);
-  const alpha = comparisons
-    ? alphaPerComparison(comparisons, request.test.alpha, active)
-    : request.test.alpha;
-  const tailAlpha = alpha / request.test.sides;
-  const criticalValueAt = (df: number | null) => criticalValue(tailAlpha, df);
+  const test = singleTest(request.test, request.outcome);
+  const model = outcomeModel(request);
+  const outcomes = targets(request, plan, model);
+  const multiplicity = multiplicityFor(request.test, plan.comparisons, active);
   const normalReference = request.test.reference === 'normal';
   const analyse: Bound['analyse'] = (groupUnits, clusterSize, modelled = outcomes) => {
     const analysis = plan.analyse(groupUnits, modelled, clusterSize);
@@ -63,25 +68,22 @@ export function bind(request: AppraisalRequest): Bound {
     request,
     plan,
     outcomes,
-    alphaPerComparison: alpha,
+    test,
+    multiplicity,
     analyse,
-    criticalValue: criticalValueAt,
     evaluate(groupUnits, clusterSize, modelled) {
       const analysis = analyse(groupUnits, clusterSize, modelled);
-      const critical = criticalValueAt(analysis.df);
-      const powers = analysis.contrasts.map((contrast) => superiorityPower(contrast, critical, analysis.df));
-      return { analysis, criticalValue: critical, powers, power: Math.min(...powers) };
+      const criticalValue = multiplicity.criticalValue(analysis);
+      const { each, goal } = multiplicity.powers(analysis, criticalValue, test);
+      return { analysis, criticalValue, powers: each, power: goal };
     },
-    noncentralityNeeded: (contrast, df, power) =>
-      noncentralityNeeded(contrast, criticalValueAt(df), df, power),
   };
 }
 
-function targets(
-  effects: readonly number[] | undefined,
-  active: number,
-  model: OutcomeModel,
-): OutcomeModel[] {
+/** The outcome of each active arm: the study's target, or the effects that the comparisons state. */
+function targets({ test }: AppraisalRequest, plan: DesignPlan, model: OutcomeModel): OutcomeModel[] {
+  const active = plan.arms.length - 1;
+  const effects = plan.comparisons?.effects;
   if (effects && effects.length !== active) {
     throw new CalcError(
       'schema',
@@ -89,25 +91,23 @@ function targets(
       `State one effect per active arm: ${active}, not ${effects.length}.`,
     );
   }
+  const path = (index: number) => (effects ? `design.comparisons.effects.${index}` : model.targetPath);
+  effects?.forEach((effect, index) => {
+    const message = model.refuseTarget?.(effect);
+    if (message) throw new CalcError('schema', path(index), message);
+  });
   const models = effects?.map((effect) => model.at(effect)) ?? Array<OutcomeModel>(active).fill(model);
-  models.forEach(({ kind, target, nullTarget }, index) => {
-    const path = effects ? `design.comparisons.effects.${index}` : targetPath(kind);
-    if (kind === 'binary' && (target <= 0 || target >= 1)) {
-      throw new CalcError('schema', path, 'The active proportion must lie between 0 and 1, both excluded.');
-    }
-    if (target === nullTarget) {
+  models.forEach(({ target, nullTarget }, index) => {
+    if (test.hypothesis === 'superiority' && target === nullTarget) {
       throw new CalcError(
         'no-effect',
-        path,
+        path(index),
         'There is no effect to find: a superiority trial needs a target difference.',
       );
     }
   });
   return models;
 }
-
-const targetPath = (kind: OutcomeModel['kind']) =>
-  kind === 'binary' ? 'outcome.active' : 'outcome.difference';
 
 function refuseCombination({ design, outcome, test }: AppraisalRequest): void {
   const { name, combines } = familyOf(design.family);
@@ -116,18 +116,15 @@ function refuseCombination({ design, outcome, test }: AppraisalRequest): void {
     throw new CalcError(
       'unsupported',
       'outcome.kind',
-      `${name} designs are not computed for a ${outcome.kind} outcome; they are for ${Object.keys(combines).join(' and ')}.`,
+      `${name} designs are not computed for ${outcomeWords[outcome.kind]}; they are for ${list(Object.keys(combines).map((kind) => outcomeWords[kind as OutcomeKind]))}.`,
     );
   }
   if (!hypotheses.includes(test.hypothesis)) {
     throw new CalcError(
       'unsupported',
       'test.hypothesis',
-      `${name} designs with a ${outcome.kind} outcome are not computed for ${test.hypothesis}; they are for ${hypotheses.join(' and ')}.`,
+      `${name} designs are not computed for ${test.hypothesis} of ${outcomeWords[outcome.kind]}; they are for ${list(hypotheses)}.`,
     );
-  }
-  if (test.margin !== undefined) {
-    throw new CalcError('unsupported', 'test.margin', 'A superiority test has no margin; leave it out.');
   }
 }
 
@@ -139,7 +136,7 @@ function refuseForDesign({ test, attrition }: AppraisalRequest, plan: DesignPlan
       'This comparison has no degrees of freedom and always uses the normal distribution; leave the reference out.',
     );
   }
-  if (attrition?.units && plan.clusterSize === undefined) {
+  if (attrition?.units && !plan.losesClusters) {
     throw new CalcError(
       'unsupported',
       'attrition.units',
@@ -152,6 +149,13 @@ function refuseAim({ aim, test }: AppraisalRequest, plan: DesignPlan): void {
   if ('power' in aim && aim.power <= test.alpha / test.sides) {
     throw new CalcError('schema', 'aim.power', 'The power must be above the type I error in one tail.');
   }
+  if (aim.find === 'effect' && test.hypothesis !== 'superiority') {
+    throw new CalcError(
+      'unsupported',
+      'aim.find',
+      'An effect is found for superiority only: here the margin is what matters.',
+    );
+  }
   if (aim.find === 'cluster-size' && plan.clusterSize === undefined) {
     throw new CalcError(
       'unsupported',
@@ -163,7 +167,7 @@ function refuseAim({ aim, test }: AppraisalRequest, plan: DesignPlan): void {
     throw new CalcError(
       'too-few-units',
       'aim.units',
-      `At least ${plan.minimumUnits} are needed here, so that every group has two.`,
+      `At least ${plan.minimumUnits} are needed here, so that every group has enough to be analysed and the test a degree of freedom.`,
     );
   }
 }

@@ -3,16 +3,17 @@ import type { AppraisalRequest } from './parse-request.js';
 
 /** Cautions that do not depend on the family. */
 export function generalCautions(
-  { attrition, design, test }: AppraisalRequest,
-  comparisons: number,
+  { attrition, design, dilution, test }: AppraisalRequest,
+  active: number,
   missing: readonly string[],
 ): Caution[] {
   const cautions: Caution[] = [];
-  const adjust = 'comparisons' in design ? design.comparisons?.adjust : undefined;
-  if (adjust === 'none' && comparisons > 1) {
+  const compared = 'comparisons' in design ? design.comparisons : undefined;
+  const count = compared?.against === 'all-pairs' ? (active * (active + 1)) / 2 : active;
+  if (compared?.adjust === 'none' && count > 1) {
     cautions.push({
       code: 'multiplicity',
-      message: `${comparisons} comparisons, each tested at ${percent(test.alpha)} without adjustment: say why no adjustment is called for, or choose one.`,
+      message: `${count} comparisons, each tested at ${percent(test.alpha)} without adjustment: say why no adjustment is called for, or choose one.`,
       source: 'CONSORT extension for multi-arm trials, 2019',
     });
   }
@@ -23,6 +24,14 @@ export function generalCautions(
       message:
         'More than 20 % are expected to be lost. Recruiting more makes up for the number, never for the bias of who is lost.',
       source: 'Schulz & Grimes 2002',
+    });
+  }
+  const diluted = (dilution?.contamination ?? 0) > 0 || (dilution?.nonAdherence ?? 0) > 0;
+  if (diluted && test.hypothesis !== 'superiority') {
+    cautions.push({
+      code: 'dilution',
+      message: `Contamination and non-adherence make arms look alike, which flatters ${test.hypothesis}: plan without dilution, and analyse those who adhered as well.`,
+      source: 'CONSORT extension for non-inferiority and equivalence trials, 2012',
     });
   }
   if (missing.length > 0) {

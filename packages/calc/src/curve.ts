@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import type { CurvePoint } from './appraisal.js';
-import { moneyAndTime } from './appraise.js';
+import { moneyAndTime, precision } from './appraise.js';
 import { type Bound, bind } from './bind.js';
 import { CalcError } from './errors.js';
 import { type AppraisalRequest, parseRequest } from './parse-request.js';
@@ -73,12 +73,14 @@ function unitsOf(bound: Bound): number {
 
 function curvePoint(bound: Bound, size: number, units: number, clusterSize: number | undefined): CurvePoint {
   const { plan, request } = bound;
+  const evaluated = bound.evaluate(plan.groupUnits(units), clusterSize);
   const point: CurvePoint = {
     size,
-    power: bound.evaluate(plan.groupUnits(units), clusterSize).power,
+    power: evaluated.power,
+    expectedHalfWidth: precision(bound, evaluated).expectedHalfWidth,
     participants: 0,
   };
-  if ('power' in request.aim) {
+  if ('power' in request.aim && request.test.hypothesis === 'superiority') {
     const detectable = detectableEffect(bound, units, request.aim.power, clusterSize);
     if (typeof detectable === 'number') point.detectable = detectable;
   }

@@ -2,7 +2,8 @@ import type { Feasible, Step } from './appraisal.js';
 import { moneyAndTime } from './appraise.js';
 import { type Bound, bind, type Evaluated } from './bind.js';
 import type { Layout } from './designs/family.js';
-import { outcomeSteps } from './explain/outcome-steps.js';
+import { outcomeSteps, targetName } from './explain/outcome-steps.js';
+import { testSteps } from './explain/test-steps.js';
 import { tex, texAmount } from './explain/tex.js';
 import type { OutcomeModel } from './outcomes/outcome-model.js';
 import { type AppraisalRequest, parseRequest } from './parse-request.js';
@@ -48,63 +49,7 @@ export function explain(request: AppraisalRequest): Step[] {
   ];
 }
 
-function testSteps(bound: Bound, { analysis, criticalValue, powers }: Evaluated): Step[] {
-  const { test } = bound.request;
-  const { df } = analysis;
-  const count = analysis.contrasts.length;
-  const adjusted = bound.alphaPerComparison !== test.alpha;
-  const tail = bound.alphaPerComparison / test.sides;
-  const steps: Step[] = [];
-  if (adjusted) {
-    steps.push({
-      label: 'Type I error of each comparison',
-      formula: '\\alpha_c=\\alpha/C',
-      substituted: `${tex(test.alpha)}/${count}`,
-      value: bound.alphaPerComparison,
-      source: 'Bonferroni’s inequality',
-    });
-  }
-  const alpha = adjusted ? '\\alpha_c' : '\\alpha';
-  const tailFormula = test.sides === 2 ? `${alpha}/2` : alpha;
-  steps.push({
-    label: `Critical value, ${test.sides === 2 ? 'two-sided' : 'one-sided'}`,
-    formula: df === null ? `P(Z>c)=${tailFormula}` : `P(T_\\nu>c)=${tailFormula}`,
-    substituted: df === null ? `P(Z>c)=${tex(tail)}` : `P(T_{${tex(df)}}>c)=${tex(tail)}`,
-    value: criticalValue,
-    source: df === null ? 'Normal distribution' : 'Student’s t distribution',
-  });
-  analysis.contrasts.forEach((contrast, index) => {
-    const { standardError: se, nullStandardError: se0, correction } = contrast;
-    const delta = Math.abs(contrast.effect);
-    const name =
-      count === 1
-        ? 'Power'
-        : `Power, ${bound.plan.arms[contrast.arm]} against ${bound.plan.arms[contrast.versus]}`;
-    const taken = correction === undefined ? '' : '-\\mathrm{cc}';
-    const takenValue = correction === undefined ? '' : `-${tex(correction)}`;
-    const power = powers[index] as number;
-    steps.push(
-      df === null
-        ? {
-            label: name,
-            formula: `1-\\beta=\\Phi\\!\\left(\\frac{|\\delta|${taken}-c\\,\\mathrm{SE}${se0 === undefined ? '' : '_0'}}{\\mathrm{SE}}\\right)`,
-            substituted: `\\Phi\\!\\left(\\frac{${tex(delta)}${takenValue}-${tex(criticalValue)}\\times${tex(se0 ?? se)}}{${tex(se)}}\\right)`,
-            value: power,
-            source: 'Fleiss, Levin & Paik 2003; Julious 2004',
-          }
-        : {
-            label: name,
-            formula: "1-\\beta=P\\!\\left(T'_{\\nu}(|\\delta|/\\mathrm{SE})>c\\right)",
-            substituted: `P\\!\\left(T'_{${tex(df)}}(${tex(delta / se)})>${tex(criticalValue)}\\right)`,
-            value: power,
-            source: 'Noncentral t distribution; Julious 2004, Stat Med 23:1921',
-          },
-    );
-  });
-  return steps;
-}
-
-function answerSteps({ request, plan, outcomes }: Bound, solution: Solution, evaluated: Evaluated): Step[] {
+function answerSteps({ request, plan }: Bound, solution: Solution, evaluated: Evaluated): Step[] {
   const { aim } = request;
   if (aim.find === 'size') {
     const fewest: Step = {
@@ -141,10 +86,7 @@ function answerSteps({ request, plan, outcomes }: Bound, solution: Solution, eva
   if (aim.find === 'effect') {
     return [
       {
-        label:
-          outcomes[0]?.kind === 'binary'
-            ? 'Detectable active proportion'
-            : 'Detectable difference, before dilution',
+        label: `Detectable ${targetName(request.outcome)}`,
         formula: '\\text{target with }1-\\beta=1-\\beta_{\\mathrm{aim}}',
         substituted: `1-\\beta=${tex(aim.power)}`,
         value: solution.detectable as number,
@@ -161,18 +103,21 @@ function recruitmentSteps({ request }: Bound, layout: Layout): Step[] {
   const { recruited } = totalsOf(layout);
   const [group] = layout.groups;
   if (!group || (!lost && !lostClusters)) return [];
+  const kept = (share: number | undefined) => `1-${tex(share ?? 0)}`;
   const clustered = group.clusters !== undefined;
   return [
     {
-      label: 'Recruited in all, so that the analysed remain',
+      label: clustered
+        ? 'Recruited in all: clusters before some are lost, times the recruits of each'
+        : 'Recruited in all, so that the analysed remain',
       formula: clustered
-        ? '\\sum_g\\left\\lceil\\frac{k_g}{1-a_k}\\right\\rceil\\left\\lceil\\frac{m}{1-a}\\right\\rceil'
+        ? '\\sum_g\\left\\lceil\\frac{k_g}{1-a_k}\\right\\rceil r_g'
         : '\\sum_g\\left\\lceil\\frac{n_g}{1-a}\\right\\rceil',
       substituted: layout.groups
         .map((each) =>
           clustered
-            ? `${each.recruitedClusters}\\times${layout.recruitedPerCluster}`
-            : `\\left\\lceil\\frac{${each.participants}}{1-${tex(lost ?? 0)}}\\right\\rceil`,
+            ? `\\left\\lceil\\frac{${each.clusters}}{${kept(lostClusters)}}\\right\\rceil\\times${each.recruited / (each.recruitedClusters as number)}`
+            : `\\left\\lceil\\frac{${each.participants}}{${kept(lost)}}\\right\\rceil`,
         )
         .join('+'),
       value: recruited,

@@ -14,13 +14,22 @@ export type {
   Timeline,
 } from './appraisal.js';
 export { appraise } from './appraise.js';
+export { type LeverOffer, leversOf } from './comparison/levers.js';
 export { type LimitKey, type Limits, limitKeys, limitsSchema, type Use } from './comparison/limits.js';
 export {
   type PlanningValueKey,
+  type PlanningValuePlace,
   type PlanningValueUnit,
   planningValueKeys,
   planningValueTraits,
 } from './comparison/planning-values.js';
+export {
+  type QuestionOutcome,
+  type QuestionPlan,
+  questionOutcomeSchema,
+  questionPlanSchema,
+  targetOf,
+} from './comparison/question-plan.js';
 export { planningValueFor, planningValuesOf, requestOf, type Study } from './comparison/request-of.js';
 export type { Standing } from './comparison/standing.js';
 export {
@@ -30,10 +39,6 @@ export {
   ledgerEntrySchema,
   type OptionPlan,
   optionPlanSchema,
-  type QuestionOutcome,
-  type QuestionPlan,
-  questionOutcomeSchema,
-  questionPlanSchema,
   type Ruling,
   rulingSchema,
   type StudyCosts,
@@ -46,6 +51,12 @@ export { type CurveSpec, curve } from './curve.js';
 export { type Design, type FamilyId, families, familyIds } from './designs/registry.js';
 export { CalcError, type CalcErrorCode, calcErrorCodes } from './errors.js';
 export { explain } from './explain.js';
+export type { Best } from './optimise/best.js';
+export { cheapest } from './optimise/cheapest.js';
+export { optimalAllocation, optimalClusterSize } from './optimise/closed-forms.js';
+export { mostPower } from './optimise/most-power.js';
+export { paretoFront, type Weighed } from './optimise/pareto-front.js';
+export { type SearchPlan, searchPlanSchema } from './optimise/search-plan.js';
 export { type AppraisalRequest, appraisalRequestSchema, parseRequest } from './parse-request.js';
 export {
   type Aim,

@@ -57,6 +57,18 @@ export const allocation = z
     message: 'No group may be more than 1000 times as large as another.',
   });
 
+/** Probabilities of ordered categories: all of them together are certain, and no single one is. */
+export const categoryProbabilities = z
+  .array(closedProportion('A category probability'))
+  .min(2, 'State two categories or more.')
+  .max(100, 'State at most 100 categories.')
+  .refine((probabilities) => Math.abs(probabilities.reduce((sum, p) => sum + p, 0) - 1) <= 1e-9, {
+    message: 'The category probabilities must add up to 1.',
+  })
+  .refine((probabilities) => probabilities.filter((p) => p > 0).length > 1, {
+    message: 'One category has everyone: at least two must be possible.',
+  });
+
 const better = z.enum(['higher', 'lower']).optional();
 
 const repeatedSchema = z.strictObject({
@@ -81,19 +93,24 @@ export const outcomeSchema = z.discriminatedUnion('kind', [
     method: z.enum(['pooled', 'unpooled', 'continuity-corrected', 'arcsine']).optional(),
     better,
   }),
-  z.strictObject({
-    kind: z.literal('time-to-event'),
-    hazardRatio: positive('The hazard ratio'),
-    controlSurvival: z.strictObject({
-      at: positive('The month at which survival is stated'),
-      probability: openProportion('The control survival'),
+  z
+    .strictObject({
+      kind: z.literal('time-to-event'),
+      hazardRatio: positive('The hazard ratio'),
+      controlSurvival: z.strictObject({
+        at: positive('The month at which survival is stated'),
+        probability: openProportion('The control survival'),
+      }),
+      accrual: quantity('The accrual period', 0),
+      followUp: quantity('The follow-up', 0),
+      dropoutHazard: quantity('The dropout hazard', 0).optional(),
+      method: z.enum(['schoenfeld', 'freedman']).optional(),
+      better,
+    })
+    .refine(({ accrual, followUp }) => accrual + followUp >= smallestSpread, {
+      path: ['followUp'],
+      message: 'Nobody is followed up: accrual or follow-up must be above 0.',
     }),
-    accrual: quantity('The accrual period', 0),
-    followUp: quantity('The follow-up', 0),
-    dropoutHazard: quantity('The dropout hazard', 0).optional(),
-    method: z.enum(['schoenfeld', 'freedman']).optional(),
-    better,
-  }),
   z.strictObject({
     kind: z.literal('count'),
     controlRate: positive('The control rate'),
@@ -104,7 +121,7 @@ export const outcomeSchema = z.discriminatedUnion('kind', [
   }),
   z.strictObject({
     kind: z.literal('ordinal'),
-    controlProbabilities: z.array(closedProportion('A category probability')).min(2).max(100),
+    controlProbabilities: categoryProbabilities,
     oddsRatio: positive('The odds ratio'),
     better,
   }),
@@ -195,6 +212,9 @@ export type Outcome = z.infer<typeof outcomeSchema>;
 export type OutcomeKind = Outcome['kind'];
 export type ContinuousOutcome = Extract<Outcome, { kind: 'continuous' }>;
 export type BinaryOutcome = Extract<Outcome, { kind: 'binary' }>;
+export type TimeToEventOutcome = Extract<Outcome, { kind: 'time-to-event' }>;
+export type CountOutcome = Extract<Outcome, { kind: 'count' }>;
+export type OrdinalOutcome = Extract<Outcome, { kind: 'ordinal' }>;
 export type TestPlan = z.infer<typeof testSchema>;
 export type Hypothesis = TestPlan['hypothesis'];
 export type Comparisons = z.infer<typeof comparisonsSchema>;

@@ -2,11 +2,13 @@ import type { Infeasible } from './appraisal.js';
 import type { Bound, Evaluated } from './bind.js';
 import { normalQuantile } from './distributions/normal.js';
 import { smallestInteger } from './numeric/integer-search.js';
+import { maximum } from './numeric/maximum.js';
 import { findRoot } from './numeric/root.js';
 import { secantRoot } from './numeric/secant.js';
 import type { OutcomeModel } from './outcomes/outcome-model.js';
+import { powerRoot } from './power-root.js';
 import { largestCount } from './request.js';
-import type { Contrast } from './tests/analysis.js';
+import type { Analysis, Contrast } from './tests/analysis.js';
 
 export interface Solution {
   units: number;
@@ -26,6 +28,8 @@ export function solve(bound: Bound): Solution | Shortfall {
   const { aim } = bound.request;
   const { clusterSize } = bound.plan;
   const asked = { clusterSize, outcomes: bound.outcomes };
+  const beyond = beyondMargin(bound);
+  if (beyond) return beyond;
   switch (aim.find) {
     case 'power':
       return { ...asked, units: aim.units };
@@ -42,10 +46,24 @@ export function solve(bound: Bound): Solution | Shortfall {
   }
 }
 
+/** Non-inferiority or equivalence cannot be shown of an effect that is at its margin or beyond. */
+function beyondMargin({ request: { test }, test: { distance }, outcomes }: Bound): Shortfall | undefined {
+  if (test.hypothesis === 'superiority') return undefined;
+  const nearest = Math.min(...outcomes.map(({ effect }) => distance(effect)));
+  if (nearest > 0) return undefined;
+  return {
+    code: 'margin',
+    message: `The expected effect lies ${nearest === 0 ? 'at' : 'beyond'} the margin, so no size can show ${test.hypothesis}. Reconsider the margin, the expected effect or the question.`,
+    limitingPower: nearest === 0 ? test.alpha : 0,
+  };
+}
+
 function solveSize(bound: Bound, power: number): Solution | Shortfall {
   const { plan } = bound;
   const guess = guessUnits(bound, power);
-  const unrounded = plan.equalPair && guess <= largestCount ? unroundedUnits(bound, guess, power) : undefined;
+  const superiority = bound.request.test.hypothesis === 'superiority';
+  const unrounded =
+    plan.equalPair && superiority && guess <= largestCount ? unroundedUnits(bound, guess, power) : undefined;
   // Below the real-valued solution nothing reaches the power: there is no rounding that could.
   const floor = unrounded === undefined ? 0 : unrounded * (1 - 1e-9);
   let evaluated: Evaluated | undefined;
@@ -84,17 +102,34 @@ function solveSize(bound: Bound, power: number): Solution | Shortfall {
 function guessUnits(bound: Bound, power: number): number {
   const { plan } = bound;
   const start = Math.max(plan.minimumUnits, 100);
-  const shares = bound
-    .analyse(plan.groupUnits(start))
-    .contrasts.map(
-      (contrast) =>
-        (bound.noncentralityNeeded(contrast, null, power) * contrast.standardError) /
-        Math.abs(contrast.effect),
-    );
-  const units = start * Math.max(...shares) ** 2;
+  const atStart = { ...bound.analyse(plan.groupUnits(start)), df: null };
+  const critical = bound.multiplicity.criticalValue(atStart);
+  const shares = atStart.contrasts.map(
+    (contrast) =>
+      (bound.test.noncentralityNeeded(contrast, critical, null, power) * contrast.standardError) /
+      bound.test.distance(contrast.effect),
+  );
+  const share = Math.max(...shares);
+  const factor = bound.multiplicity.separate ? share : jointShare(bound, atStart, critical, power, share);
+  const units = start * factor ** 2;
   if (!(units < largestCount)) return units;
   const { df } = bound.analyse(plan.groupUnits(Math.max(plan.minimumUnits, Math.ceil(units))));
-  return df === null ? units : units * (1 + bound.criticalValue(null) ** 2 / (2 * df));
+  return df === null ? units : units * (1 + critical ** 2 / (2 * df));
+}
+
+/** How much larger each |δ|/SE has to be for a goal of several comparisons, from what the hardest of them needs. */
+function jointShare(
+  { multiplicity, test }: Bound,
+  { df, contrasts }: Analysis,
+  critical: number,
+  power: number,
+  guess: number,
+): number {
+  const powerAt = (share: number) => {
+    const closer = contrasts.map((each) => ({ ...each, standardError: each.standardError / share }));
+    return multiplicity.powers({ df, contrasts: closer }, critical, test).goal;
+  };
+  return powerRoot(powerAt, power, guess, 1e-4) ?? 0;
 }
 
 /**
@@ -125,18 +160,53 @@ export function detectableEffect(
 ): number | Shortfall {
   const model = bound.outcomes[0] as OutcomeModel;
   const groupUnits = bound.plan.groupUnits(units);
-  return model.varianceFixed
-    ? closedFormEffect(bound, bound.evaluate(groupUnits, clusterSize), model, power)
-    : searchedEffect(bound, groupUnits, model, power, clusterSize);
+  if (!model.varianceFixed) return searchedEffect(bound, groupUnits, model, power, clusterSize);
+  const alike = bound.outcomes.map(() => model);
+  const separate = closedFormEffect(bound, bound.evaluate(groupUnits, clusterSize, alike), model, power);
+  return bound.multiplicity.separate
+    ? separate
+    : jointEffect(bound, groupUnits, model, power, clusterSize, separate);
 }
 
-function closedFormEffect(bound: Bound, { analysis }: Evaluated, model: OutcomeModel, power: number): number {
+function closedFormEffect(
+  bound: Bound,
+  { analysis, criticalValue }: Evaluated,
+  model: OutcomeModel,
+  power: number,
+): number {
   const needed = analysis.contrasts.map(
-    (contrast) => bound.noncentralityNeeded(contrast, analysis.df, power) * contrast.standardError,
+    (contrast) =>
+      bound.test.noncentralityNeeded(contrast, criticalValue, analysis.df, power) * contrast.standardError,
   );
   return (
     (Math.sign(model.target - model.nullTarget) * Math.max(...needed)) / model.dilution + model.nullTarget
   );
+}
+
+/** For a goal of several comparisons, from the effect that the hardest of them needs by itself. */
+function jointEffect(
+  bound: Bound,
+  groupUnits: readonly number[],
+  model: OutcomeModel,
+  power: number,
+  clusterSize: number | undefined,
+  separate: number,
+): number | Shortfall {
+  const powerAt = (share: number) => {
+    const moved = model.at(model.nullTarget + share * (separate - model.nullTarget));
+    return bound.evaluate(
+      groupUnits,
+      clusterSize,
+      bound.outcomes.map(() => moved),
+    ).power;
+  };
+  const share = powerRoot(powerAt, power, 1, 1e-13);
+  if (share !== undefined) return model.nullTarget + share * (separate - model.nullTarget);
+  return {
+    code: 'effect',
+    message:
+      'So low a power is reached by chance alone with this many comparisons, without any effect. Ask for more power.',
+  };
 }
 
 const effectGrid = 64;
@@ -148,7 +218,8 @@ function searchedEffect(
   power: number,
   clusterSize: number | undefined,
 ): number | Shortfall {
-  const targetAt = (share: number) => model.nullTarget + share * (model.targetLimit - model.nullTarget);
+  const targetAt = (share: number) =>
+    model.targetAlong?.(share) ?? model.nullTarget + share * (model.targetLimit - model.nullTarget);
   const powerAt = (share: number) => {
     const moved = model.at(targetAt(share));
     return bound.evaluate(
@@ -157,31 +228,47 @@ function searchedEffect(
       bound.outcomes.map(() => moved),
     ).power;
   };
-  let below = 0;
+  const firstIn = (below: number, share: number) =>
+    targetAt(findRoot((x) => powerAt(x) - power, below, share, { tolerance: 1e-14 }).root);
+  let peak = 0;
+  let highest = 0;
   for (let step = 1; step <= effectGrid; step += 1) {
     const share = step / effectGrid;
-    if (powerAt(share) >= power) {
-      const { root } = findRoot((x) => powerAt(x) - power, below, share, { tolerance: 1e-14 });
-      return targetAt(root);
+    const reached = powerAt(share);
+    if (reached >= power) return firstIn(share - 1 / effectGrid, share);
+    if (reached > highest) {
+      highest = reached;
+      peak = share;
     }
-    below = share;
   }
+  // Power falls again where a rarer event makes the larger effect harder to see: the peak may lie between steps.
+  const below = Math.max(0, peak - 1 / effectGrid);
+  peak = maximum(powerAt, below, Math.min(1, peak + 1 / effectGrid));
+  highest = Math.max(highest, powerAt(peak));
+  if (highest >= power) return firstIn(below, peak);
   return {
     code: 'effect',
-    message: 'No effect on this side of the control proportion reaches the power at this size.',
-    limitingPower: powerAt(1),
+    message: `No effect on this side of none reaches the power at this size: the highest is ${(100 * highest).toFixed(1)} %.`,
+    limitingPower: highest,
   };
 }
 
 function solveClusterSize(bound: Bound, units: number, power: number): Solution | Shortfall {
   const { plan } = bound;
-  const limitAt = (count: number) => bound.evaluate(plan.groupUnits(count), Number.POSITIVE_INFINITY);
+  const at = (count: number, clusterSize: number) =>
+    bound.evaluate(plan.groupUnits(count), clusterSize).power;
+  // Where only a size beyond all that may be named would reach the power, that is no answer either.
+  const limitAt = (count: number) => {
+    const limit = at(count, Number.POSITIVE_INFINITY);
+    return limit > power ? at(count, largestCount) : limit;
+  };
   const limit = limitAt(units);
-  const reaches = (clusterSize: number) => bound.evaluate(plan.groupUnits(units), clusterSize).power >= power;
   const clusterSize =
-    limit.power > power ? smallestInteger(reaches, { from: 1, to: largestCount, guess: 16 }) : undefined;
+    limit > power
+      ? smallestInteger((size) => at(units, size) >= power, { from: 1, to: largestCount, guess: 16 })
+      : undefined;
   if (clusterSize !== undefined) return { units, clusterSize, outcomes: bound.outcomes };
-  const fewestUnits = smallestInteger((count) => limitAt(count).power > power, {
+  const fewestUnits = smallestInteger((count) => limitAt(count) > power, {
     from: plan.minimumUnits,
     to: largestCount,
     guess: units + 1,
@@ -189,8 +276,8 @@ function solveClusterSize(bound: Bound, units: number, power: number): Solution 
   });
   return {
     code: 'clusters',
-    message: `With these clusters no cluster size reaches the power: however large they grow, power stays below ${(100 * limit.power).toFixed(1)} %.`,
-    limitingPower: limit.power,
+    message: `With these clusters no cluster size reaches the power: however large they grow, power stays below ${(100 * limit).toFixed(1)} %.`,
+    limitingPower: limit,
     ...(fewestUnits === undefined ? {} : { fewestUnits }),
   };
 }

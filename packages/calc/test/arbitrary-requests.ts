@@ -1,65 +1,32 @@
 import fc from 'fast-check';
 import type { AppraisalRequest, FamilyId } from '../src/index.js';
-
-const continuous = fc.record({
-  kind: fc.constant('continuous' as const),
-  difference: fc.double({ min: 0.05, max: 3, noNaN: true }),
-  sd: fc.double({ min: 0.5, max: 4, noNaN: true }),
-});
-
-const binary = fc
-  .record({
-    kind: fc.constant('binary' as const),
-    control: fc.double({ min: 0.05, max: 0.95, noNaN: true }),
-    active: fc.double({ min: 0.05, max: 0.95, noNaN: true }),
-  })
-  .filter(({ control, active }) => Math.abs(control - active) > 0.03);
-
-const share = fc.double({ min: 0.3, max: 3, noNaN: true });
-
-const test = fc.record({
-  hypothesis: fc.constant('superiority' as const),
-  alpha: fc.constantFrom(0.001, 0.01, 0.025, 0.05, 0.1),
-  sides: fc.constantFrom(1 as const, 2 as const),
-});
+import { designsOf } from './arbitrary-designs.js';
+import { questionsOf } from './arbitrary-outcomes.js';
+import { type Combination, everyCombination, isComputed } from './combinations.js';
 
 const aim = fc.record({
   find: fc.constant('size' as const),
   power: fc.double({ min: 0.3, max: 0.99, noNaN: true }),
 });
 
-const designs = {
-  parallel: fc.record({
-    family: fc.constant('parallel' as const),
-    allocation: fc.tuple(share, share),
-  }),
-  'multi-arm': fc.record({
-    family: fc.constant('multi-arm' as const),
-    allocation: fc.array(share, { minLength: 3, maxLength: 6 }),
-    comparisons: fc.record({
-      against: fc.constant('control' as const),
-      adjust: fc.constantFrom('none' as const, 'bonferroni' as const),
-      powerGoal: fc.constant('per-comparison' as const),
-    }),
-  }),
-  crossover: fc.record({
-    family: fc.constant('crossover' as const),
-    sequences: fc.constantFrom<string[]>(['AB', 'BA'], ['BA', 'AB']),
-    correlation: fc.double({ min: -0.5, max: 0.95, noNaN: true }),
-  }),
-  cluster: fc.record({
-    family: fc.constant('cluster' as const),
-    icc: fc.double({ min: 0, max: 0.3, noNaN: true }),
-    clusterSize: fc.integer({ min: 1, max: 200 }),
-    clusterSizeCv: fc.double({ min: 0, max: 1, noNaN: true }),
-    allocation: fc.tuple(share, share),
-  }),
-} satisfies Record<FamilyId, fc.Arbitrary<unknown>>;
+/** Requests of one combination that the calculation answers, with an aim of a size. */
+export function requestsFor(combination: Combination): fc.Arbitrary<AppraisalRequest> {
+  const { kind, hypothesis } = combination;
+  return fc
+    .record({ question: questionsOf(kind, hypothesis), design: designsOf(combination), aim })
+    .map(({ question, design, aim }) => {
+      // Rates in clusters vary by their rateCv alone.
+      if (design.family === 'cluster' && question.outcome.kind === 'count')
+        delete question.outcome.dispersion;
+      return { ...question, design, aim };
+    });
+}
 
-/** Requests of one family that the calculation answers, with an aim of a size. */
+/** Requests of one family, whatever outcomes and hypotheses it answers. */
 export function requestsOf(family: FamilyId): fc.Arbitrary<AppraisalRequest> {
-  const outcome = family === 'crossover' ? continuous : fc.oneof(continuous, binary);
-  return fc.record({ outcome, test, design: designs[family], aim });
+  return fc.oneof(
+    ...everyCombination.filter((each) => each.family === family && isComputed(each)).map(requestsFor),
+  );
 }
 
 /** Whole counts where CI is set, a tenth otherwise. */

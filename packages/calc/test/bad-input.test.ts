@@ -1,30 +1,25 @@
 import { describe, expect, it } from 'vitest';
-import { type AppraisalRequest, appraise, CalcError, type CalcErrorCode } from '../src/index.js';
+import { type AppraisalRequest, appraise, type CalcErrorCode } from '../src/index.js';
+import { errorOf, withField } from './faults.js';
 import { abba, clusters, threeArms, twoMeans, twoProportions } from './requests.js';
 
-/** The request with one field, given by its path, set to a value. */
-function withField(request: AppraisalRequest, path: string, value: unknown): AppraisalRequest {
-  const copy = structuredClone(request) as unknown as Record<string, unknown>;
-  const keys = path.split('.');
-  const leaf = keys.pop() as string;
-  let parent = copy;
-  for (const key of keys) {
-    parent[key] ??= {};
-    parent = parent[key] as Record<string, unknown>;
-  }
-  parent[leaf] = value;
-  return copy as unknown as AppraisalRequest;
-}
-
-function errorOf(request: unknown): CalcError {
-  try {
-    appraise(request as AppraisalRequest);
-  } catch (error) {
-    if (error instanceof CalcError) return error;
-    throw error;
-  }
-  throw new Error('no error was raised');
-}
+const factorial: AppraisalRequest = { ...twoMeans, design: { family: 'factorial', estimand: 'main-effect' } };
+const nested: AppraisalRequest = {
+  ...twoMeans,
+  design: { family: 'partially-nested', icc: 0.05, groupSize: 8 },
+};
+const threeLevels: AppraisalRequest = {
+  ...twoMeans,
+  design: {
+    family: 'three-level-cluster',
+    iccCluster: 0.02,
+    iccSubcluster: 0.06,
+    subclusterSize: 10,
+    subclustersPerCluster: 4,
+  },
+};
+const clusterSizeAim = { find: 'cluster-size', units: 10, power: 0.8 };
+const repeated = { baselines: 1, followUps: 1, correlation: 0.5 };
 
 const faults: [AppraisalRequest, string, unknown, CalcErrorCode][] = [
   [twoMeans, 'outcome.sd', 0, 'schema'],
@@ -35,12 +30,12 @@ const faults: [AppraisalRequest, string, unknown, CalcErrorCode][] = [
   [twoMeans, 'outcome.sd', Number.POSITIVE_INFINITY, 'schema'],
   [twoMeans, 'outcome.difference', 0, 'no-effect'],
   [twoMeans, 'outcome.sdactive', 3, 'schema'],
-  [twoMeans, 'outcome', { kind: 'ordinal', controlProbabilities: [0.5, 0.5], oddsRatio: 2 }, 'unsupported'],
+  [abba, 'outcome', { kind: 'ordinal', controlProbabilities: [0.5, 0.5], oddsRatio: 2 }, 'unsupported'],
   [twoMeans, 'outcome.kind', 'ordinary', 'schema'],
   [twoMeans, 'test.alpha', 0, 'schema'],
   [twoMeans, 'test.alpha', 0.6, 'schema'],
   [twoMeans, 'test.sides', 3, 'schema'],
-  [twoMeans, 'test.hypothesis', 'equivalence', 'unsupported'],
+  [threeArms, 'test.hypothesis', 'equivalence', 'unsupported'],
   [twoMeans, 'test.margin', 1, 'unsupported'],
   [twoMeans, 'aim.power', 1, 'schema'],
   [twoMeans, 'aim.power', 0.02, 'schema'],
@@ -66,7 +61,7 @@ const faults: [AppraisalRequest, string, unknown, CalcErrorCode][] = [
   [twoProportions, 'outcome.method', 'exact', 'schema'],
   [abba, 'design.correlation', 1, 'schema'],
   [abba, 'design.correlation', undefined, 'schema'],
-  [abba, 'design.sequences', ['AB', 'AB'], 'unsupported'],
+  [abba, 'design.sequences', ['AB', 'AB'], 'not-estimable'],
   [abba, 'design.sequences', ['ab', 'BA'], 'schema'],
   [abba, 'design.carryover', true, 'not-estimable'],
   [abba, 'outcome.sdActive', 3, 'unsupported'],
@@ -74,14 +69,38 @@ const faults: [AppraisalRequest, string, unknown, CalcErrorCode][] = [
   [clusters, 'design.icc', undefined, 'schema'],
   [clusters, 'design.clusterSize', 2.5, 'schema'],
   [clusters, 'design.clusterSize', 0, 'schema'],
-  [clusters, 'design.allocation', [1, 1, 1], 'unsupported'],
   [clusters, 'outcome.sdActive', 3, 'unsupported'],
-  [threeArms, 'design.comparisons.adjust', 'holm', 'unsupported'],
-  [threeArms, 'design.comparisons.powerGoal', 'conjunctive', 'unsupported'],
-  [threeArms, 'design.comparisons.against', 'all-pairs', 'unsupported'],
+  [threeArms, 'design.comparisons.adjust', 'scheffe', 'schema'],
+  [threeArms, 'design.comparisons.powerGoal', 'most', 'schema'],
   [threeArms, 'design.comparisons.effects', [5], 'schema'],
+  [threeArms, 'design.comparisons.effects', [5, 0], 'no-effect'],
   [threeArms, 'outcome.sdActive', 3, 'unsupported'],
   [threeArms, 'design.allocation', [1, 1], 'schema'],
+  [factorial, 'design.estimand', 'simple-effect', 'schema'],
+  [factorial, 'design.allocation', [1, 1], 'schema'],
+  [factorial, 'outcome.sdActive', 3, 'unsupported'],
+  [factorial, 'outcome.repeated', repeated, 'unsupported'],
+  [factorial, 'attrition.units', 0.1, 'unsupported'],
+  [factorial, 'aim', clusterSizeAim, 'unsupported'],
+  [factorial, 'costs', { currency: 'EUR', perExposure: [1, 2] }, 'schema'],
+  [nested, 'design.icc', -0.01, 'schema'],
+  [nested, 'design.icc', undefined, 'schema'],
+  [nested, 'design.groupSize', 0, 'schema'],
+  [nested, 'design.groupSize', 7.5, 'schema'],
+  [nested, 'design.allocation', [1, 1, 1], 'schema'],
+  [nested, 'outcome.sdActive', 3, 'unsupported'],
+  [nested, 'attrition.units', 0.1, 'unsupported'],
+  [nested, 'aim', clusterSizeAim, 'unsupported'],
+  [nested, 'test.hypothesis', 'equivalence', 'unsupported'],
+  [threeLevels, 'design.iccSubcluster', 0.01, 'impossible-correlation'],
+  [threeLevels, 'design.iccSubcluster', 1.01, 'schema'],
+  [threeLevels, 'design.iccCluster', undefined, 'schema'],
+  [threeLevels, 'design.subclusterSize', 0, 'schema'],
+  [threeLevels, 'design.subclustersPerCluster', 1.5, 'schema'],
+  [threeLevels, 'design.clusterSizeCv', 0.3, 'schema'],
+  [threeLevels, 'outcome', { kind: 'binary', control: 0.2, active: 0.3, method: 'pooled' }, 'unsupported'],
+  [threeLevels, 'outcome', { kind: 'count', controlRate: 1, rateRatio: 0.8, exposure: 1 }, 'unsupported'],
+  [threeLevels, 'aim', clusterSizeAim, 'unsupported'],
 ];
 
 describe('a request that breaks a bound', () => {
@@ -95,6 +114,16 @@ describe('a request that breaks a bound', () => {
   it('is refused when it asks for fewer units than can be analysed', () => {
     const error = errorOf({ ...twoMeans, aim: { find: 'power', units: 1 } });
     expect([error.code, error.path]).toEqual(['too-few-units', 'aim.units']);
+  });
+
+  it('is refused when a treatment group or a control participant would stand alone', () => {
+    const few = { ...nested, aim: { find: 'power', units: 1 } };
+    expect(errorOf(few).code).toBe('too-few-units');
+    const design = { family: 'partially-nested', icc: 0, groupSize: 1, allocation: [1, 4] };
+    expect(errorOf({ ...nested, design, aim: { find: 'power', units: 4 } }).code).toBe('too-few-units');
+    expect(
+      appraise({ ...nested, design, aim: { find: 'power', units: 5 } } as AppraisalRequest).feasible,
+    ).toBe(true);
   });
 
   it('is refused when it is no object at all', () => {
@@ -157,6 +186,19 @@ describe('an aim out of reach', () => {
       false,
       true,
     ]);
+  });
+
+  it('answers when only a cluster size beyond all bounds would do', () => {
+    // Two degrees of freedom at so small a type I error: the critical value is above 20 000.
+    const appraisal = appraise({
+      ...clusters,
+      test: { hypothesis: 'superiority', alpha: 1e-9, sides: 1 },
+      design: { family: 'cluster', icc: 0, clusterSize: 1 },
+      aim: { find: 'cluster-size', units: 2, power: 0.9 },
+    });
+    if (appraisal.feasible) throw new Error('expected no answer');
+    expect(appraisal.infeasible.limitingPower).toBeLessThan(0.9);
+    expect(appraisal.infeasible.fewestUnits).toBeGreaterThan(2);
   });
 
   it('answers when no active proportion can be told from control at that size', () => {

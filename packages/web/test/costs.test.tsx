@@ -1,14 +1,12 @@
 import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
-import { afterEach, describe, expect, it } from 'vitest';
-import { useKeptEdits } from '../src/features/studies/model/kept-edits';
+import { describe, expect, it } from 'vitest';
+import { useKeptEdits } from '../src/features/unsaved/model/kept-edits';
 import { greenkettle } from './fixtures/greenkettle';
 import { stillfoot } from './fixtures/stillfoot';
 import type { StudyFixture } from './fixtures/study-fixture';
 import { openApp } from './open-app';
 import { problem, serve, server } from './server';
-
-afterEach(() => useKeptEdits.setState(useKeptEdits.getInitialState()));
 
 async function openCosts(fixture: StudyFixture) {
   serve(fixture);

@@ -76,10 +76,37 @@ describe('The history of a study', () => {
     expect(within(items[2] as HTMLElement).queryByRole('columnheader', { name: 'After' })).toBeNull();
   });
 
-  it('names arms and treatments by their number', async () => {
-    openHistory([entry(9, { what: 'option “Crossover”', before: null, after: { 'plan.treatments.0': 1 } })]);
+  it('names arms and what is paid for each as the study calls its treatments', async () => {
+    openHistory([
+      entry(9, {
+        what: 'option “Crossover”',
+        before: null,
+        after: { 'plan.treatments.0': 1, 'plan.treatments.1': 5, 'plan.repeated.followUps': 2 },
+      }),
+      entry(8, { what: 'costs and accrual', before: null, after: { 'costs.perExposure.0': 54 } }),
+    ]);
+    const [option, costs] = (await changes()).getAllByRole('listitem') as [HTMLElement, HTMLElement];
+    expect(await within(option).findByRole('row', { name: 'Arm 1 vantholine gel' })).toBeVisible();
+    expect(within(option).getByRole('row', { name: 'Arm 2 treatment 6' })).toBeVisible();
+    expect(within(option).getByRole('row', { name: 'Repeated follow-ups 2' })).toBeVisible();
+    expect(within(costs).getByRole('row', { name: 'Costs: per exposure, vehicle gel 54' })).toBeVisible();
+  });
+
+  it('tells what had no name before by its parts alone', async () => {
+    openHistory([
+      entry(9, {
+        what: 'the question',
+        before: { clusters: null },
+        after: { 'clusters.one': 'practice', 'clusters.many': 'practices' },
+      }),
+    ]);
     const item = (await changes()).getByRole('listitem');
-    expect(within(item).getByRole('row', { name: 'Arm 1 treatment 2' })).toBeVisible();
+    const rows = within(item).getAllByRole('row');
+    expect(rows.map((row) => [...row.children].map((cell) => cell.textContent))).toEqual([
+      ['Fact', 'Before', 'After'],
+      ['Clusters one', 'none', 'practice'],
+      ['Clusters many', 'none', 'practices'],
+    ]);
   });
 
   it('folds many facts away and unfolds them on request', async () => {
@@ -88,7 +115,7 @@ describe('The history of a study', () => {
     );
     const { user } = openHistory([entry(9, { what: 'costs and accrual', before: null, after })]);
     const item = (await changes()).getByRole('listitem');
-    const cell = within(item).getByText('Costs: per exposure 8');
+    const cell = within(item).getByText('Costs: per exposure, treatment 8');
     expect(cell).not.toBeVisible();
     await user.click(within(item).getByText('eight facts'));
     expect(cell).toBeVisible();

@@ -1,13 +1,11 @@
 import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
-import { afterEach, describe, expect, it } from 'vitest';
-import { useKeptEdits } from '../src/features/studies/model/kept-edits';
+import { describe, expect, it } from 'vitest';
+import { useKeptEdits } from '../src/features/unsaved/model/kept-edits';
 import { stillfoot } from './fixtures/stillfoot';
 import type { StudyFixture } from './fixtures/study-fixture';
 import { openApp } from './open-app';
 import { problem, serve, server } from './server';
-
-afterEach(() => useKeptEdits.setState(useKeptEdits.getInitialState()));
 
 async function openLedger(fixture: StudyFixture) {
   serve(fixture);
@@ -154,7 +152,7 @@ describe('The ledger', () => {
     const fixture = stillfoot();
     Object.assign(fixture.ledger[1] as object, { source: 'assumed, replace' });
     await openLedger(fixture);
-    expect(screen.getByText(/one value says “assumed, replace”/)).toBeVisible();
+    expect(screen.getByText(/One value says “assumed, replace”/)).toBeVisible();
     expect(line('Correlation with baseline').getAllByText('assumed, replace')).toHaveLength(2);
   });
 

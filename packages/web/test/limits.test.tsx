@@ -1,10 +1,13 @@
 import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
 import { describe, expect, it } from 'vitest';
+import { useKeptEdits } from '../src/features/unsaved/model/kept-edits';
 import { greenkettle } from './fixtures/greenkettle';
 import type { StudyFixture } from './fixtures/study-fixture';
 import { answer, problem, server } from './server';
 import { openWeigh, optionRow } from './weigh-page';
+
+const edits = () => Object.keys(useKeptEdits.getState().edits);
 
 const limits = { clusters: 32, participantsPerCluster: 60, money: 800_000, months: 30 };
 
@@ -65,7 +68,7 @@ describe('Limits', () => {
     const fixture = greenkettle();
     fixture.limits = { version: 1, limits };
     await openWeigh(fixture);
-    expect(within(row()).getByRole('img', { name: /Cost by arm.*the limit is 800\sk€/ })).toBeVisible();
+    expect(within(row()).getByRole('button', { name: /Cost by arm.*the limit is 800\sk€/ })).toBeVisible();
   });
 
   it('are set in one dialog that begins at the one pressed', async () => {
@@ -74,7 +77,7 @@ describe('Limits', () => {
     const { user } = await openWeigh(fixture);
     const sent = takes(fixture, 'limits');
     await user.click(screen.getByRole('button', { name: '≤ 32 catchments' }));
-    const dialog = within(screen.getByRole('dialog', { name: 'Limits' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'Limits' }));
     expect(dialog.getByLabelText('Catchments')).toHaveFocus();
     await user.clear(dialog.getByLabelText('Catchments'));
     await user.type(dialog.getByLabelText('Catchments'), '44');
@@ -88,7 +91,7 @@ describe('Limits', () => {
   it('refuse half a catchment at its field', async () => {
     const { user } = await openWeigh(greenkettle());
     await user.click(screen.getByRole('button', { name: 'Set limits' }));
-    await user.type(screen.getByLabelText('Catchments'), '2.5');
+    await user.type(await screen.findByLabelText('Catchments'), '2.5');
     await user.click(screen.getByRole('button', { name: 'Set the limits' }));
     expect(await screen.findByText('The number of clusters must be a whole number.')).toBeVisible();
     expect(screen.getByLabelText('Catchments')).toBeInvalid();
@@ -98,7 +101,7 @@ describe('Limits', () => {
     const fixture = greenkettle();
     const first = await openWeigh(fixture);
     await first.user.click(screen.getByRole('button', { name: 'Set limits' }));
-    await first.user.type(screen.getByLabelText('Months'), 'thirty');
+    await first.user.type(await screen.findByLabelText('Months'), 'thirty');
     cleanup();
     const second = await openWeigh(fixture);
     await second.user.click(screen.getByRole('button', { name: 'Set limits' }));
@@ -116,35 +119,13 @@ describe('Limits', () => {
     await user.click(screen.getByRole('button', { name: 'Set the limits' }));
     await waitFor(() => expect(screen.queryByRole('dialog')).not.toBeInTheDocument());
     expect(sent).toEqual([{ version: null, limits: { months: 30 } }]);
-    expect(sessionStorage).toHaveLength(0);
+    expect(edits()).toEqual([]);
     await user.click(screen.getByRole('button', { name: 'More limits' }));
     await user.type(screen.getByLabelText('Months'), '6');
-    expect(sessionStorage).toHaveLength(1);
+    expect(edits()).toHaveLength(1);
     await user.click(screen.getByRole('button', { name: 'Cancel' }));
     await user.click(screen.getByRole('button', { name: 'More limits' }));
     expect(screen.getByLabelText('Months')).toHaveValue('30');
-  });
-
-  it('that someone else has set meanwhile are shown beside what was typed, which stays', async () => {
-    const fixture = greenkettle();
-    const { user } = await openWeigh(fixture);
-    await user.click(screen.getByRole('button', { name: 'Set limits' }));
-    await user.type(screen.getByLabelText('Months'), '30');
-    server.use(
-      http.get('*/api/studies/:id/limits', () => HttpResponse.json({ version: 7, limits: { months: 24 } })),
-      http.put(
-        '*/api/studies/:id/limits',
-        () => problem(409, 'stale', { detail: 'Someone else has changed this in the meantime.' }),
-        { once: true },
-      ),
-    );
-    await user.click(screen.getByRole('button', { name: 'Set the limits' }));
-    expect(await screen.findByText(/Now: ≤ 24 months\. Save yours/)).toBeVisible();
-    expect(screen.getByLabelText('Months')).toHaveValue('30');
-    const sent = takes(fixture, 'limits');
-    fixture.limits = { version: 7, limits: { months: 24 } };
-    await user.click(screen.getByRole('button', { name: 'Set the limits' }));
-    await waitFor(() => expect(sent).toEqual([{ version: 7, limits: { months: 30 } }]));
   });
 
   it('are read only for those who may not edit', async () => {
@@ -186,7 +167,7 @@ describe('The hold', () => {
     const { user } = await openWeigh(fixture);
     const sent = takes(fixture, 'design-set');
     await user.click(screen.getByRole('button', { name: 'Change what is held' }));
-    const dialog = within(screen.getByRole('dialog', { name: 'What is kept equal' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'What is kept equal' }));
     expect(dialog.getByLabelText('Power')).toHaveValue('80');
     await user.clear(dialog.getByLabelText('Power'));
     await user.type(dialog.getByLabelText('Power'), '100');
@@ -202,7 +183,7 @@ describe('The hold', () => {
     const fixture = greenkettle();
     const first = await openWeigh(fixture);
     await first.user.click(screen.getByRole('button', { name: 'Change what is held' }));
-    await first.user.click(screen.getByRole('radio', { name: /^Budget:/ }));
+    await first.user.click(await screen.findByRole('radio', { name: /^Budget:/ }));
     await first.user.type(screen.getByLabelText('Budget'), '700,000');
     cleanup();
     const second = await openWeigh(fixture);
@@ -222,10 +203,10 @@ describe('The hold', () => {
     await user.click(dialog().getByRole('button', { name: 'Hold' }));
     await waitFor(() => expect(screen.queryByRole('dialog')).not.toBeInTheDocument());
     expect(sent).toMatchObject([{ hold: { kind: 'budget', power: 0.9, budget: 700_000 } }]);
-    expect(sessionStorage).toHaveLength(0);
+    expect(edits()).toEqual([]);
     await user.click(screen.getByRole('button', { name: 'Change what is held' }));
     await user.type(screen.getByLabelText('Power'), '9');
-    expect(sessionStorage).toHaveLength(1);
+    expect(edits()).toHaveLength(1);
     await user.click(dialog().getByRole('button', { name: 'Cancel' }));
     await user.click(screen.getByRole('button', { name: 'Change what is held' }));
     expect(screen.getByLabelText('Power')).toHaveValue('90');

@@ -1,6 +1,7 @@
 import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import { delay, HttpResponse, http } from 'msw';
 import { describe, expect, it } from 'vitest';
+import { useKeptEdits } from '../src/features/unsaved/model/kept-edits';
 import { stillfoot } from './fixtures/stillfoot';
 import { openApp } from './open-app';
 import { answer, person, problem, serve, server } from './server';
@@ -107,7 +108,7 @@ describe('The members of a study', () => {
     await waitFor(async () => expect(await rows()).toHaveLength(3));
     expect(sent).toEqual([{ email: 'ilse@brackwater.example', role: 'investigator' }]);
     expect(await screen.findByText('Added ilse@brackwater.example as investigator.')).toBeVisible();
-    expect(sessionStorage).toHaveLength(0);
+    expect(useKeptEdits.getState().edits).toEqual({});
     expect(screen.getByLabelText('E-mail')).toHaveValue('');
   });
 

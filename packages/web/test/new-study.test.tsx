@@ -1,14 +1,12 @@
 import { cleanup, screen, waitFor } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
-import { afterEach, describe, expect, it } from 'vitest';
-import { useKeptEdits } from '../src/features/studies/model/kept-edits';
+import { describe, expect, it } from 'vitest';
+import { useKeptEdits } from '../src/features/unsaved/model/kept-edits';
 import { greenkettle } from './fixtures/greenkettle';
 import { stillfoot } from './fixtures/stillfoot';
 import type { StudyFixture } from './fixtures/study-fixture';
 import { openApp } from './open-app';
 import { answer, problem, serve, server } from './server';
-
-afterEach(() => useKeptEdits.setState(useKeptEdits.getInitialState()));
 
 const field = (name: string | RegExp) => screen.getByRole('textbox', { name });
 const start = () => screen.getByRole('button', { name: 'Start weighing' });
@@ -72,6 +70,44 @@ describe('A new study', () => {
     ]);
     expect(useKeptEdits.getState().edits).toEqual({});
   });
+
+  it.each([
+    {
+      kind: /^Time to an event/,
+      typed: {
+        'Target hazard ratio': '0.7',
+        'Survival is stated at': '12',
+        Accrual: '18',
+        'Follow-up after accrual': '12',
+        'Controls free of the event': '60',
+      },
+      outcome: { kind: 'time-to-event', hazardRatio: 0.7, survivalAt: 12, accrual: 18, followUp: 12 },
+      value: { controlSurvival: 0.6 },
+    },
+    {
+      kind: /^Count/,
+      typed: { 'Target rate ratio': '0,75', 'Exposure of each': '1', 'Control rate': '1.4' },
+      outcome: { kind: 'count', rateRatio: 0.75, exposure: 1 },
+      value: { controlRate: 1.4 },
+    },
+  ])(
+    'asks for what belongs to its kind of outcome: $outcome.kind',
+    async ({ kind, typed, outcome, value }) => {
+      const sent = takeStudies(stillfoot());
+      const { user } = await openNewStudy();
+      await user.type(field(/^Question/), 'Does it help?');
+      await user.type(field('Name of the study'), 'Helpful');
+      await user.type(field('Organisation'), 'A clinic');
+      await user.type(field(/^Outcome/), 'An outcome');
+      await user.click(screen.getByRole('radio', { name: kind }));
+      for (const [label, text] of Object.entries(typed)) {
+        await user.type(field(new RegExp(`^${label}`)), text);
+      }
+      await user.click(start());
+      await screen.findByRole('table', { name: 'Options' });
+      expect(sent[0]).toMatchObject({ outcome: { label: 'An outcome', unit: '', ...outcome }, ...value });
+    },
+  );
 
   it('asks for proportions and for the study’s own words where clusters are randomised', async () => {
     const sent = takeStudies(greenkettle());

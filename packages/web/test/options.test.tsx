@@ -3,26 +3,16 @@ import { screen, waitFor, within } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
 import { describe, expect, it } from 'vitest';
 import { stillfoot } from './fixtures/stillfoot';
-import { id } from './fixtures/study-fixture';
 import { server } from './server';
-import { openWeigh, optionRows, optionRow as row } from './weigh-page';
+import { addsOptions, openWeigh, optionRows, optionRow as row } from './weigh-page';
 
 describe('The options together', () => {
   it('gain one of each family that the study can have', async () => {
     const fixture = stillfoot();
     const { user, address } = await openWeigh(fixture);
-    const sent: unknown[] = [];
-    server.use(
-      http.post('*/api/studies/:id/options', async ({ request }) => {
-        const body = (await request.json()) as OptionView;
-        sent.push(body);
-        const added = { ...body, id: id(), version: 1, ruling: null };
-        fixture.designSet.options.push(added);
-        return HttpResponse.json(added, { status: 201 });
-      }),
-    );
+    const sent = addsOptions(fixture);
     await user.click(screen.getByRole('button', { name: 'Add option' }));
-    const dialog = within(screen.getByRole('dialog', { name: 'Add an option' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'Add an option' }));
     expect(dialog.getByRole('button', { name: 'Cluster' })).toHaveAttribute('aria-disabled', 'true');
     expect(dialog.getByRole('button', { name: 'Cluster' })).toHaveAccessibleDescription(
       /what the clusters are called/,
@@ -42,6 +32,51 @@ describe('The options together', () => {
     ]);
     expect(address()).toContain(fixture.designSet.options[3]?.id);
     expect(row(/^D Crossover 2 /)).toHaveTextContent('333 k€');
+  });
+
+  it('are proposed by what the question allows, and others come with a ruling that has a reason', async () => {
+    const fixture = stillfoot();
+    const { user } = await openWeigh(fixture);
+    const sent = addsOptions(fixture);
+    await user.click(screen.getByRole('button', { name: 'Add option' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'Add an option' }));
+    const stable = within(
+      dialog.getByRole('radiogroup', { name: 'Is the condition stable, and does the effect wear off?' }),
+    );
+    expect(dialog.getByRole('button', { name: 'Crossover' })).not.toHaveAccessibleDescription(
+      /The effect stays/,
+    );
+    await user.click(stable.getByRole('radio', { name: 'No' }));
+    expect(dialog.getByRole('button', { name: 'Crossover' })).toHaveAccessibleDescription(
+      /The effect stays or the condition changes.* It can be added with a ruling\./,
+    );
+    await user.click(dialog.getByRole('button', { name: 'Crossover' }));
+    await user.click(dialog.getByRole('button', { name: 'Add with this ruling' }));
+    expect(await dialog.findByText('Give the reason of the ruling.')).toBeVisible();
+    expect(sent).toEqual([]);
+    await user.type(dialog.getByRole('textbox', { name: /^Reason/ }), 'To show what it would have saved');
+    await user.click(dialog.getByRole('button', { name: 'Add with this ruling' }));
+    await waitFor(() => expect(optionRows()).toHaveLength(5));
+    expect(sent[0]).toMatchObject({
+      name: 'Crossover 2',
+      plan: { family: 'crossover' },
+      ruling: { kind: 'not-admissible', reason: 'To show what it would have saved' },
+    });
+  });
+
+  it('that speak against the answers are left to the methodologist', async () => {
+    const fixture = stillfoot();
+    fixture.study.role = 'investigator';
+    const { user } = await openWeigh(fixture);
+    await user.click(screen.getByRole('button', { name: 'Add option' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'Add an option' }));
+    const individuals = within(dialog.getByRole('radiogroup', { name: 'Can individuals be randomised?' }));
+    await user.click(individuals.getByRole('radio', { name: 'No' }));
+    const parallel = dialog.getByRole('button', { name: 'Parallel' });
+    expect(parallel).toHaveAttribute('aria-disabled', 'true');
+    expect(parallel).toHaveAccessibleDescription(
+      /Individuals cannot be randomised\. A methodologist can add it with a ruling\./,
+    );
   });
 
   it('change places', async () => {
@@ -104,7 +139,7 @@ describe('The options together', () => {
       }),
     );
     await user.click(screen.getByRole('button', { name: 'Rule on it' }));
-    await user.click(screen.getByRole('radio', { name: 'Not admissible' }));
+    await user.click(await screen.findByRole('radio', { name: 'Not admissible' }));
     await user.click(screen.getByRole('button', { name: 'Rule' }));
     expect(await screen.findByText('Give the reason of the ruling.')).toBeVisible();
     await user.type(screen.getByLabelText('Reason'), 'Too many to recruit.');
@@ -134,7 +169,7 @@ describe('The choice', () => {
       }),
     );
     await user.click(screen.getByRole('button', { name: 'Record the choice' }));
-    const dialog = within(screen.getByRole('dialog', { name: 'Record the choice' }));
+    const dialog = within(await screen.findByRole('dialog', { name: 'Record the choice' }));
     await user.click(dialog.getByRole('radio', { name: 'C, Crossover' }));
     await user.type(dialog.getByLabelText('Why this one'), 'The fewest participants.');
     await user.click(dialog.getByRole('button', { name: 'Record the choice' }));

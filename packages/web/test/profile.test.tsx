@@ -1,4 +1,4 @@
-import { screen, waitFor } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
 import { describe, expect, it } from 'vitest';
 import { openApp } from './open-app';
@@ -67,10 +67,11 @@ describe('The profile', () => {
     await user.clear(name);
     await user.type(name, 'Tomas Quill');
     await user.click(screen.getByRole('button', { name: 'Save the name' }));
-    expect(await screen.findByRole('alert')).toHaveTextContent(
-      'the name there is “T. Arrivel”. Save again to make it “Tomas Quill”.',
-    );
+    const conflict = within(await screen.findByRole('alert'));
+    expect(conflict.getByText('Another session of yours saved first')).toBeVisible();
+    expect(conflict.getByRole('row', { name: 'Name Tomas Quill T. Arrivel' })).toBeVisible();
     expect(name).toHaveValue('Tomas Quill');
+    await user.click(conflict.getByRole('button', { name: 'Go on with mine' }));
     await user.click(screen.getByRole('button', { name: 'Save the name' }));
     expect(await screen.findByText('Your name is saved.')).toBeVisible();
     expect(screen.queryByRole('alert')).not.toBeInTheDocument();

@@ -1,14 +1,12 @@
 import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import { HttpResponse, http } from 'msw';
-import { afterEach, describe, expect, it } from 'vitest';
-import { useKeptEdits } from '../src/features/studies/model/kept-edits';
+import { describe, expect, it } from 'vitest';
+import { useKeptEdits } from '../src/features/unsaved/model/kept-edits';
 import { greenkettle } from './fixtures/greenkettle';
 import { stillfoot } from './fixtures/stillfoot';
 import type { StudyFixture } from './fixtures/study-fixture';
 import { openApp } from './open-app';
 import { problem, serve, server } from './server';
-
-afterEach(() => useKeptEdits.setState(useKeptEdits.getInitialState()));
 
 async function openQuestion(fixture: StudyFixture) {
   serve(fixture);
@@ -66,6 +64,50 @@ describe('The question', () => {
       basis: null,
       estimand: null,
       clusters: null,
+    });
+  });
+
+  it('asks for a margin where non-inferiority is tested, and of one side', async () => {
+    const fixture = stillfoot();
+    const sent = takeQuestions(fixture);
+    const { user } = await openQuestion(fixture);
+    await user.click(screen.getByRole('radio', { name: /^Non-inferiority/ }));
+    await user.click(screen.getByRole('button', { name: 'Save the question' }));
+    expect(await screen.findByText('State the margin that the difference must stay within.')).toBeVisible();
+    expect(sent).toEqual([]);
+    expect(screen.queryByRole('radio', { name: 'Two-sided' })).toBeNull();
+    expect(field('Type I error')).toHaveValue('2.5');
+    expect(field(/^Assumed difference/)).toHaveValue('-1');
+    await user.type(field('Margin'), '0.5');
+    await user.click(screen.getByRole('button', { name: 'Save the question' }));
+    await waitFor(() => expect(sent).toHaveLength(1));
+    expect(sent[0]?.plan).toEqual({
+      outcome: { kind: 'continuous', difference: -1, better: 'lower' },
+      test: { hypothesis: 'non-inferiority', alpha: 0.025, sides: 1, margin: 0.5 },
+    });
+  });
+
+  it('asks for the categories of an ordinal outcome, which sum to 1', async () => {
+    const fixture = stillfoot();
+    const sent = takeQuestions(fixture);
+    const { user } = await openQuestion(fixture);
+    await user.click(screen.getByRole('radio', { name: /^Ordinal/ }));
+    await user.type(field(/^Target odds ratio/), '1.8');
+    await user.type(field('Category 1'), '20');
+    await user.type(field('Category 2'), '50');
+    await user.type(field('Category 3'), '40');
+    await user.click(screen.getByRole('button', { name: 'Save the question' }));
+    expect(await screen.findByText('The probabilities of the categories must sum to 1.')).toBeVisible();
+    await user.click(screen.getByRole('button', { name: 'Remove category 3' }));
+    await user.click(screen.getByRole('button', { name: 'Add a category' }));
+    await user.type(field('Category 3'), '30');
+    await user.click(screen.getByRole('button', { name: 'Save the question' }));
+    await waitFor(() => expect(sent).toHaveLength(1));
+    expect(sent[0]).toHaveProperty('plan.outcome', {
+      kind: 'ordinal',
+      better: 'lower',
+      oddsRatio: 1.8,
+      controlProbabilities: [0.2, 0.5, 0.3],
     });
   });
 

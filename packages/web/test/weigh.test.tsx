@@ -8,19 +8,12 @@ import { option, type StudyFixture } from './fixtures/study-fixture';
 import { openApp } from './open-app';
 import { problem, serve, server } from './server';
 import { smallScreen, surroundings } from './surroundings';
+import { openWeigh, optionRow as row } from './weigh-page';
 
 const weighPath = ({ study }: StudyFixture) => `/studies/${study.id}/weigh`;
 
-async function openWeigh(fixture: StudyFixture, search = '') {
-  serve(fixture);
-  const app = openApp(`${weighPath(fixture)}${search}`);
-  await screen.findByRole('table', { name: 'Options' });
-  return app;
-}
-
-const row = (name: RegExp) =>
-  within(screen.getByRole('table', { name: 'Options' })).getByRole('row', { name });
-const choice = (name: RegExp) => within(row(name)).getByRole('button');
+const choice = (name: RegExp) => within(within(row(name)).getByRole('rowheader')).getByRole('button');
+const beams = () => screen.getByRole('region', { name: 'Options side by side' });
 const panel = () => screen.getByRole('region', { name: /^Option [A-Z]+$/ });
 const fact = (name: string) => within(panel()).getByText(name, { selector: 'dt' }).nextElementSibling;
 
@@ -73,7 +66,7 @@ describe('Weigh', () => {
     await waitFor(() => expect(fact('Participants analysed')).toHaveTextContent('656'));
     expect(fact('Participants recruited')).toHaveTextContent('748');
     expect(row(/adjusted/)).toHaveTextContent('705 k€');
-    const beam = within(row(/adjusted/)).getByRole('img', { name: /Cost by arm/ });
+    const beam = within(row(/adjusted/)).getByRole('button', { name: /Cost by arm/ });
     expect(beam).toHaveAccessibleName(/Advice sheet .*, 2 sessions .*, 4 sessions .*, 8 sessions/);
   });
 
@@ -155,7 +148,7 @@ describe('Weigh', () => {
     const fixture = stillfoot();
     await openWeigh(fixture, `?option=${fixture.designSet.options[2]?.id}`);
     const cautions = within(panel()).getByRole('region', { name: 'Cautions' });
-    expect(cautions).toHaveTextContent(/No carryover from the first period .* Senn 2002\./);
+    expect(cautions).toHaveTextContent(/No carryover from one period into the next .* Senn 2002\./);
   });
 
   it('keeps an option that cannot be computed, with the reason', async () => {
@@ -170,7 +163,7 @@ describe('Weigh', () => {
 
   it('gives the beams as a table of exact figures', async () => {
     const { user } = await openWeigh(stillfoot());
-    await user.click(screen.getByRole('button', { name: 'Table' }));
+    await user.click(within(beams()).getByRole('button', { name: 'Table' }));
     const table = screen.getByRole('table', { name: 'Options as a table' });
     const crossover = within(table).getByRole('row', { name: /Crossover/ });
     expect(crossover).toHaveTextContent('Sequence AB: Vehicle gel, then Vantholine gel');

@@ -1,9 +1,10 @@
 import { screen, waitFor, within } from '@testing-library/react';
 import { describe, expect, it } from 'vitest';
+import { draftKey, keepDraft } from '../src/features/designs/model/drafts';
 import { stillfoot } from './fixtures/stillfoot';
 import { option, type StudyFixture } from './fixtures/study-fixture';
 import { openApp } from './open-app';
-import { serve } from './server';
+import { person, serve } from './server';
 
 function openWorking(fixture: StudyFixture, position: number) {
   serve(fixture);
@@ -74,13 +75,37 @@ describe('The working of an option', () => {
 
   it('says why there is none where the option cannot be computed', async () => {
     const fixture = stillfoot();
-    fixture.designSet.options.push(
-      option('Three sequences', { family: 'crossover', structure: { sequences: ['AB', 'BA', 'AA'] } }),
-    );
+    fixture.designSet.options.push(option('Clusters', { family: 'cluster', clusterSize: 20 }));
     openWorking(fixture, 3);
-    expect(await screen.findByText(/Only the two sequences AB and BA/)).toBeVisible();
+    expect(await screen.findByText(/State the ICC/)).toBeVisible();
     expect(screen.queryByRole('table', { name: 'Working, step by step' })).not.toBeInTheDocument();
     expect(screen.getByText('Request as JSON')).toBeVisible();
+  });
+
+  it('says that it works out edits which are not saved, and leads to what is stored and back', async () => {
+    const fixture = stillfoot();
+    const [first] = fixture.designSet.options;
+    if (!first) throw new Error('Stillfoot has options.');
+    const base = { name: first.name, plan: first.plan };
+    const plan = { ...first.plan, overrides: { sd: { value: 2.6, reason: 'These sites vary more.' } } };
+    keepDraft(draftKey(person.id, first.id), { ...base, plan, base });
+    const { user } = openWorking(fixture, 0);
+    expect(await screen.findByText(/the working of your edits, which are not saved/)).toBeVisible();
+    const taken = () => within(screen.getByRole('table', { name: 'Planning values' }));
+    expect(
+      taken().getByRole('row', { name: /^Standard deviation .* 2\.6\spoints 2\.1\spoints/ }),
+    ).toBeVisible();
+    await user.click(screen.getByRole('link', { name: 'The working of what is stored' }));
+    expect(await screen.findByText(/as it is stored, as others see it/)).toBeVisible();
+    expect(taken().getByRole('row', { name: /^Standard deviation 2\.1\spoints/ })).toBeVisible();
+    await user.click(screen.getByRole('link', { name: 'The working with your edits' }));
+    expect(await screen.findByText(/the working of your edits/)).toBeVisible();
+  });
+
+  it('says nothing of versions where there is but one', async () => {
+    openWorking(stillfoot(), 0);
+    expect(await screen.findByRole('table', { name: 'Planning values' })).toBeVisible();
+    expect(screen.queryByText(/^This is the working/)).not.toBeInTheDocument();
   });
 
   it('says that there is no such option', async () => {

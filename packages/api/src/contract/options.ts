@@ -2,12 +2,15 @@ import { holdSchema, optionPlanSchema, rulingSchema } from '@steelyard/calc';
 import { z } from 'zod';
 import { versionSchema } from './versions.js';
 
-export const newOptionSchema = z.strictObject({
+const namedPlanSchema = z.strictObject({
   name: z.string().trim().min(1, 'Name the option.').max(200),
   plan: optionPlanSchema,
 });
 
-export const changedOptionSchema = newOptionSchema.extend({ version: versionSchema });
+/** With a ruling from the start, where whoever adds it may rule. */
+export const newOptionSchema = namedPlanSchema.extend({ ruling: rulingSchema.optional() });
+
+export const changedOptionSchema = namedPlanSchema.extend({ version: versionSchema });
 
 /** Of the option's version. */
 export const newRulingSchema = rulingSchema.extend({ version: versionSchema });

@@ -15,15 +15,26 @@ const lost = z
   .min(0, 'It must be 0 or more.')
   .lt(1, 'It must be below 1: nothing would be left to analyse.');
 
+const shared = z.number().min(0, 'It must lie between 0 and 1.').max(1, 'It must lie between 0 and 1.');
+const coefficient = z.number().min(0, 'It must be 0 or more.').max(100, 'It must be 100 or less.');
+
 /** What each planning value may be, whichever design draws on it. */
 export const planningValueFigures: Record<PlanningValueKey, z.ZodNumber> = {
   sd: spread,
   sdActive: spread,
   controlProportion: between,
+  controlSurvival: between,
+  dropoutHazard: z.number().min(0, 'It must be 0 or more.').max(1e12, 'It must be 1000000000000 or less.'),
+  controlRate: spread,
+  dispersion: z.number().min(0, 'It must be 0 or more.').max(1e12, 'It must be 1000000000000 or less.'),
+  rateCv: coefficient,
   baselineCorrelation: correlation,
   withinPersonCorrelation: correlation,
-  icc: z.number().min(0, 'It must lie between 0 and 1.').max(1, 'It must lie between 0 and 1.'),
-  clusterSizeCv: z.number().min(0, 'It must be 0 or more.').max(100, 'It must be 100 or less.'),
+  icc: shared,
+  iccSubcluster: shared,
+  clusterAutocorrelation: shared,
+  individualAutocorrelation: shared,
+  clusterSizeCv: coefficient,
   attrition: lost,
   clusterAttrition: lost,
   contamination: lost,

@@ -47,16 +47,6 @@ export const treatmentsSchema = z
   .min(2, 'Name two treatments or more, control first.')
   .max(11, 'Name 11 treatments or fewer.');
 
-/** A superiority question asks for a difference. */
-export const askedPlanSchema = questionPlanSchema.superRefine(({ outcome, test }, context) => {
-  if (test.hypothesis !== 'superiority' || outcome.difference !== 0) return;
-  context.addIssue({
-    code: 'custom',
-    path: ['outcome', 'difference'],
-    message: 'The target difference must not be 0: no trial is large enough to find it.',
-  });
-});
-
 export const newQuestionSchema = z.strictObject({
   version: versionSchema,
   name: studyNameSchema,
@@ -64,7 +54,7 @@ export const newQuestionSchema = z.strictObject({
   question: questionTextSchema,
   outcomeLabel: outcomeLabelSchema,
   outcomeUnit: outcomeUnitSchema,
-  plan: askedPlanSchema,
+  plan: questionPlanSchema,
   basis: basisSchema.nullable(),
   estimand: estimandSchema.nullable(),
   participants: nounSchema,

@@ -1,9 +1,15 @@
-import { questionOutcomeSchema, testSchema } from '@steelyard/calc';
+import {
+  families,
+  type Hypothesis,
+  type OutcomeKind,
+  questionOutcomeSchema,
+  questionPlanSchema,
+  testSchema,
+} from '@steelyard/calc';
 import { z } from 'zod';
 import { nounSchema } from './nouns.js';
 import { planningValueFigures } from './planning-values.js';
 import {
-  askedPlanSchema,
   organisationSchema,
   outcomeLabelSchema,
   outcomeUnitSchema,
@@ -12,16 +18,27 @@ import {
   treatmentsSchema,
 } from './question.js';
 
-const kinds = ['continuous', 'binary'] as const satisfies z.infer<typeof questionOutcomeSchema>['kind'][];
+const named = { label: outcomeLabelSchema, unit: outcomeUnitSchema };
 
-const outcomeSchema = z.strictObject({
-  kind: z.enum(kinds),
-  label: outcomeLabelSchema,
-  unit: outcomeUnitSchema,
-  better: z.enum(['higher', 'lower']).optional(),
-  /** Active − control. */
-  difference: z.number({ error: 'The target difference must be a number.' }),
-});
+/** The outcome with its target, as the question states it, and its name. */
+const outcomeSchema = z.discriminatedUnion('kind', [
+  questionOutcomeSchema.options[0].extend(named),
+  questionOutcomeSchema.options[1].extend(named),
+  questionOutcomeSchema.options[2].extend(named),
+  questionOutcomeSchema.options[3].extend(named),
+  questionOutcomeSchema.options[4].extend(named),
+]);
+
+/** The planning value that each kind of outcome cannot do without. */
+export const neededValue = {
+  continuous: 'sd',
+  binary: 'controlProportion',
+  'time-to-event': 'controlSurvival',
+  count: 'controlRate',
+  ordinal: undefined,
+} as const;
+
+const { sd, controlProportion, controlSurvival, controlRate } = planningValueFigures;
 
 /** What a newcomer is asked; everything else is filled in with values marked as assumed. */
 export const studyStartSchema = z
@@ -30,16 +47,16 @@ export const studyStartSchema = z
     organisation: organisationSchema,
     question: questionTextSchema,
     outcome: outcomeSchema,
-    test: testSchema.pick({ alpha: true, sides: true }).optional(),
+    test: testSchema.omit({ reference: true }).partial().optional(),
     power: z
       .number()
       .gt(0, 'The power must lie between 0 and 1.')
       .lt(1, 'The power must lie between 0 and 1.')
       .optional(),
-    /** Of a continuous outcome. */
-    sd: planningValueFigures.sd.optional(),
-    /** Of a binary outcome. */
-    controlProportion: planningValueFigures.controlProportion.optional(),
+    sd: sd.optional(),
+    controlProportion: controlProportion.optional(),
+    controlSurvival: controlSurvival.optional(),
+    controlRate: controlRate.optional(),
     participants: nounSchema,
     clusters: nounSchema.nullable(),
     treatments: treatmentsSchema,
@@ -47,23 +64,34 @@ export const studyStartSchema = z
   })
   .superRefine((start, context) => {
     const refuse = (path: string[], message: string) => context.addIssue({ code: 'custom', path, message });
-    const { outcome, sd, controlProportion, clusters, randomises } = start;
-    for (const { path, message } of askedPlanSchema.safeParse(questionPlanOf(start)).error?.issues ?? []) {
-      refuse(path.map(String), message);
+    const { outcome, clusters, randomises } = start;
+    // Each field has been judged by itself already; what they require of each other is left.
+    const issues = questionPlanSchema.safeParse(questionPlanOf(start)).error?.issues ?? [];
+    for (const { code, path, message } of issues) {
+      if (code === 'custom') refuse(path.map(String), message);
     }
-    const active = (controlProportion ?? 0.5) + outcome.difference;
-    if (outcome.kind === 'binary' && controlProportion !== undefined && (active <= 0 || active >= 1)) {
-      refuse(
-        ['controlProportion'],
-        'With this difference the active proportion would not lie between 0 and 1.',
-      );
+    for (const key of Object.values(neededValue)) {
+      if (key && key !== neededValue[outcome.kind] && start[key] !== undefined) {
+        refuse([key], 'This belongs to another kind of outcome.');
+      }
     }
-    if (outcome.kind === 'binary' && sd !== undefined) refuse(['sd'], 'A proportion has no SD of its own.');
-    if (outcome.kind === 'continuous' && controlProportion !== undefined) {
-      refuse(['controlProportion'], 'A mean has no control proportion.');
+    if (outcome.kind === 'binary' && start.controlProportion !== undefined) {
+      const active = start.controlProportion + outcome.difference;
+      if (active <= 0 || active >= 1) {
+        refuse(
+          ['controlProportion'],
+          'With this difference the active proportion would not lie between 0 and 1.',
+        );
+      }
     }
-    if (randomises === 'clusters' && !clusters)
-      refuse(['clusters'], 'Name the clusters that are randomised.');
+    if (randomises !== 'clusters') return;
+    if (!clusters) refuse(['clusters'], 'Name the clusters that are randomised.');
+    const combines: Partial<Record<OutcomeKind, readonly Hypothesis[]>> = families.cluster.combines;
+    const { hypothesis } = questionPlanOf(start).test;
+    if (!combines[outcome.kind]?.includes(hypothesis)) {
+      const message = `With clusters, ${hypothesis} of this kind of outcome is not computed: choose individuals, or another outcome.`;
+      refuse(['randomises'], message);
+    }
   });
 
 /** The question as calc takes it. */
@@ -71,9 +99,9 @@ export function questionPlanOf({
   outcome,
   test,
 }: Pick<z.infer<typeof studyStartSchema>, 'outcome' | 'test'>) {
-  const { kind, difference, better } = outcome;
+  const { label: _, unit: __, ...asked } = outcome;
   return {
-    outcome: { kind, difference, ...(better && { better }) },
+    outcome: asked,
     test: { hypothesis: 'superiority' as const, alpha: 0.05, sides: 2 as const, ...test },
   };
 }

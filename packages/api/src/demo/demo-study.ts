@@ -18,5 +18,5 @@ export interface DemoStudy {
   hold: Hold;
   limits?: Dated<{ limits: Limits }>;
   /** Those ruled on, by the methodologist. */
-  options: Dated<z.input<typeof newOptionSchema> & { ruling?: Dated<Ruling> }>[];
+  options: Dated<Omit<z.input<typeof newOptionSchema>, 'ruling'> & { ruling?: Dated<Ruling> }>[];
 }

@@ -38,6 +38,15 @@ export const greenkettle: DemoStudy = {
       daysAgo: 42.7,
     },
     {
+      key: 'clusterAutocorrelation',
+      family: null,
+      value: 0.85,
+      low: 0.61,
+      high: 0.94,
+      source: 'Published range: Beta(12, 3), mode 0.85; the range holds nine tenths of it',
+      daysAgo: 42.6,
+    },
+    {
       key: 'clusterSizeCv',
       family: null,
       value: 0.35,
@@ -77,6 +86,28 @@ export const greenkettle: DemoStudy = {
       daysAgo: 9.3,
     },
     {
+      name: 'Cluster with baseline',
+      plan: {
+        family: 'cluster-baseline',
+        treatments: [0, 1],
+        structure: {},
+        clusterSize: 40,
+        overrides: {},
+      },
+      daysAgo: 9.25,
+    },
+    {
+      name: 'Stepped wedge, 4 steps',
+      plan: {
+        family: 'stepped-wedge',
+        treatments: [0, 1],
+        structure: { steps: 4 },
+        clusterSize: 25,
+        overrides: {},
+      },
+      daysAgo: 9.2,
+    },
+    {
       name: 'Individual randomisation',
       plan: { family: 'parallel', treatments: [0, 1], structure: {}, overrides: {} },
       daysAgo: 9.1,
@@ -85,6 +116,27 @@ export const greenkettle: DemoStudy = {
         reason:
           'The canteen is shared: girls in the control arm would eat the iron-rich meals too, and the difference looked for would vanish.',
         daysAgo: 7.4,
+      },
+    },
+    {
+      name: 'Crossover',
+      plan: {
+        family: 'crossover',
+        treatments: [0, 1],
+        structure: { sequences: ['AB', 'BA'] },
+        overrides: {
+          withinPersonCorrelation: {
+            value: 0.5,
+            reason: 'A round figure: the option was ruled out before anyone estimated it.',
+          },
+        },
+      },
+      daysAgo: 8.8,
+      ruling: {
+        kind: 'not-admissible',
+        reason:
+          'What girls learn about growing and eating iron-rich food stays with them, and the canteen is shared: there is no second period without the programme.',
+        daysAgo: 7.3,
       },
     },
   ],

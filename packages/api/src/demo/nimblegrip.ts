@@ -10,6 +10,14 @@ const againstAdvice = (adjust: Comparisons['adjust']): Comparisons => ({
   powerGoal: 'per-comparison',
 });
 
+function fourArms(name: string, allocation: number[], adjust: Comparisons['adjust']) {
+  const structure = { allocation, comparisons: againstAdvice(adjust) };
+  return {
+    name,
+    plan: { family: 'multi-arm' as const, treatments: everyDose, structure, repeated, overrides: {} },
+  };
+}
+
 /** Several doses in primary care. */
 export const nimblegrip: DemoStudy = {
   study: {
@@ -71,34 +79,16 @@ export const nimblegrip: DemoStudy = {
   limits: { limits: { money: 690_000, months: 49 }, daysAgo: 34.8 },
   hold: { kind: 'power', power: 0.9 },
   options: [
+    { ...fourArms('Four equal arms, no adjustment', [1, 1, 1, 1], 'none'), daysAgo: 28.7 },
+    { ...fourArms('Four equal arms, Bonferroni', [1, 1, 1, 1], 'bonferroni'), daysAgo: 28.6 },
+    { ...fourArms('Four equal arms, Dunnett', [1, 1, 1, 1], 'dunnett'), daysAgo: 27.5 },
+    { ...fourArms('Four arms, larger control, Dunnett', [Math.sqrt(3), 1, 1, 1], 'dunnett'), daysAgo: 12.4 },
     {
-      name: 'Four equal arms, no adjustment',
-      plan: {
-        family: 'multi-arm',
-        treatments: everyDose,
-        structure: { allocation: [1, 1, 1, 1], comparisons: againstAdvice('none') },
-        repeated,
-        overrides: {},
-      },
-      daysAgo: 28.7,
-    },
-    {
-      name: 'Four equal arms, Bonferroni',
-      plan: {
-        family: 'multi-arm',
-        treatments: everyDose,
-        structure: { allocation: [1, 1, 1, 1], comparisons: againstAdvice('bonferroni') },
-        repeated,
-        overrides: {},
-      },
-      daysAgo: 28.6,
-    },
-    {
-      name: 'Three arms, larger control, Bonferroni',
+      name: 'Three arms, larger control, Dunnett',
       plan: {
         family: 'multi-arm',
         treatments: [0, 1, 3],
-        structure: { allocation: [Math.SQRT2, 1, 1], comparisons: againstAdvice('bonferroni') },
+        structure: { allocation: [Math.SQRT2, 1, 1], comparisons: againstAdvice('dunnett') },
         repeated,
         overrides: {},
       },

@@ -1,6 +1,6 @@
 import type { OptionPlan, PlanningValueKey, StudyCosts } from '@steelyard/calc';
 import type { z } from 'zod';
-import type { studyStartSchema } from '../contract/study-start.js';
+import { neededValue, type studyStartSchema } from '../contract/study-start.js';
 
 type Start = z.infer<typeof studyStartSchema>;
 
@@ -15,22 +15,42 @@ interface Line {
 }
 
 /** Round figures that let the first option be weighed at once; the sources say what they are. */
-export function assumedLedger({ outcome, sd, controlProportion, clusters }: Start): Line[] {
+export function assumedLedger(start: Start): Line[] {
   const line = (key: PlanningValueKey, value: number): Line => ({ key, value, source: assumed });
-  const stated = (key: PlanningValueKey, value: number | undefined, otherwise: number): Line =>
-    value === undefined ? line(key, otherwise) : { key, value, source: entered };
-  const { kind, difference } = outcome;
+  const needed = neededValue[start.outcome.kind];
+  const stated = needed && start[needed];
   return [
-    ...(kind === 'binary'
-      ? [stated('controlProportion', controlProportion, 0.5 - difference / 2)]
-      : [
-          stated('sd', sd, 2 * Math.abs(difference)),
-          line('baselineCorrelation', 0.5),
-          line('withinPersonCorrelation', 0.5),
-        ]),
-    ...(clusters ? [line('icc', 0.05), line('clusterSizeCv', 0.3)] : []),
+    ...(needed === undefined
+      ? []
+      : stated === undefined
+        ? [line(needed, usual(start.outcome))]
+        : [{ key: needed, value: stated, source: entered }]),
+    ...(start.outcome.kind === 'continuous'
+      ? [line('baselineCorrelation', 0.5), line('withinPersonCorrelation', 0.5)]
+      : []),
+    ...(start.clusters
+      ? [
+          start.outcome.kind === 'count' ? line('rateCv', 0.25) : line('icc', 0.05),
+          line('clusterSizeCv', 0.3),
+          line('clusterAutocorrelation', 0.8),
+        ]
+      : []),
     line('attrition', 0.1),
   ];
+}
+
+/** A value to begin with where none was entered: one at which the target is neither tiny nor impossible. */
+function usual(outcome: Start['outcome']): number {
+  switch (outcome.kind) {
+    case 'continuous':
+      return 2 * (Math.abs(outcome.difference) || 1);
+    case 'binary':
+      return 0.5 - outcome.difference / 2;
+    case 'time-to-event':
+      return 0.6;
+    default:
+      return 1;
+  }
 }
 
 export function assumedCosts({ clusters, randomises }: Start): StudyCosts {

@@ -1,5 +1,6 @@
 import type { EntityManager } from '@mikro-orm/sqlite';
 import { forbidden, notFound } from '../common/problem.js';
+import type { StudyRole } from '../contract/studies.js';
 import { Membership } from './membership.entity.js';
 import { may, type StudyAction } from './permissions.js';
 
@@ -15,6 +16,10 @@ export async function openStudy(
     { populate: ['study', 'person'] },
   );
   if (!membership || !may(membership.role, 'see the draft')) throw notFound('There is no such study.');
-  if (!may(membership.role, action)) throw forbidden(`A ${membership.role} may not ${action} here.`);
+  refuseUnlessMay(membership.role, action);
   return membership;
+}
+
+export function refuseUnlessMay(role: StudyRole, action: StudyAction): void {
+  if (!may(role, action)) throw forbidden(`A ${role} may not ${action} here.`);
 }

@@ -24,21 +24,28 @@ export interface Use {
   over: number;
 }
 
+/** What an option takes of each limit that concerns it. */
+export type Load = Partial<Record<LimitKey, number | undefined>>;
+
 /** Every limit that concerns the option, in the order in which a breach binds. */
-export function usesOf(limits: Limits, request: AppraisalRequest, appraisal: Feasible): Use[] {
-  const taken: Record<LimitKey, number | undefined> = {
+export function usesOf(limits: Limits, load: Load): Use[] {
+  return limitKeys.flatMap((limit) => {
+    const [allowed, taken] = [limits[limit], load[limit]];
+    return allowed === undefined || taken === undefined
+      ? []
+      : [{ limit, allowed, taken, over: taken - allowed }];
+  });
+}
+
+/** What an appraised option takes. */
+export function loadOf({ attrition }: AppraisalRequest, appraisal: Feasible): Load {
+  const { clusterSize } = appraisal;
+  return {
     clusters: appraisal.recruitedClusters,
-    participantsPerCluster:
-      appraisal.clusterSize && recruitedFor(appraisal.clusterSize, request.attrition?.participants),
+    participantsPerCluster: clusterSize && recruitedFor(clusterSize, attrition?.participants),
     money: appraisal.costs?.total,
     months: appraisal.timeline?.months,
   };
-  return limitKeys.flatMap((limit) => {
-    const [allowed, used] = [limits[limit], taken[limit]];
-    return allowed === undefined || used === undefined
-      ? []
-      : [{ limit, allowed, taken: used, over: used - allowed }];
-  });
 }
 
 /** Money and months are real: a breach smaller than rounding is none. */

@@ -1,7 +1,8 @@
 import { type FamilyId, familyOf } from '../designs/registry.js';
-import type { RequestFor } from '../request.js';
-import type { PlanningValueKey } from './planning-values.js';
-import type { Hold, LedgerEntry, OptionPlan, QuestionPlan, StudyCosts } from './study-plan.js';
+import type { OutcomeKind, RequestFor } from '../request.js';
+import type { PlanningValueKey, PlanningValuePlace } from './planning-values.js';
+import type { QuestionPlan } from './question-plan.js';
+import type { Hold, LedgerEntry, OptionPlan, StudyCosts } from './study-plan.js';
 
 export interface Study {
   question: QuestionPlan;
@@ -21,9 +22,10 @@ export function planningValueFor(
   return overrides[key]?.value ?? line(family) ?? line(null);
 }
 
-/** Where a family's planning values go in its requests. */
-export function planningValuesOf(family: FamilyId): readonly { path: string; key: PlanningValueKey }[] {
-  return familyOf(family).planningValues;
+/** Where a family's planning values go in its requests, for one kind of outcome or for all. */
+export function planningValuesOf(family: FamilyId, kind?: OutcomeKind): readonly PlanningValuePlace[] {
+  const places = familyOf(family).planningValues;
+  return kind ? places.filter(({ outcomes }) => outcomes?.includes(kind) ?? true) : places;
 }
 
 /**
@@ -43,10 +45,12 @@ export function requestOf(study: Study, option: OptionPlan): RequestFor<unknown>
     aim: { find: 'size', power: study.hold.power },
     ...moneyOf(study, option),
   };
-  for (const { path, key } of planningValuesOf(option.family)) {
+  const { kind } = study.question.outcome;
+  for (const { path, key } of planningValuesOf(option.family, kind)) {
     const value = planningValueFor(key, option, study.ledger);
     if (value !== undefined) place(request, path, value);
   }
+  settleLosses(request);
   if (study.question.outcome.kind === 'binary') {
     const { control, ...rest } = request.outcome as { control?: number };
     request.outcome = {
@@ -63,31 +67,37 @@ function place(request: Record<string, Record<string, unknown>>, path: string, v
   const keys = path.split('.');
   const leaf = keys.pop() as string;
   const [part, ...inner] = keys as [string, ...string[]];
-  if (part === 'outcome' && inner.length === 0 && !takes(request.outcome?.kind, leaf, request.outcome))
-    return;
+  // Unequal SDs give way to repeated measurements, which pool one.
+  if (leaf === 'sdActive' && request.outcome?.repeated) return;
   request[part] ??= {};
   let parent: Record<string, unknown> | undefined = request[part];
   for (const key of inner) parent = parent?.[key] as Record<string, unknown> | undefined;
   if (parent) parent[leaf] = value;
 }
 
-const outcomeValues: Record<string, readonly string[]> = {
-  continuous: ['sd', 'sdActive'],
-  binary: ['control'],
-};
-
-/** Whether an outcome has this planning value; unequal SDs give way to repeated measurements. */
-function takes(kind: unknown, leaf: string, outcome: Record<string, unknown> | undefined): boolean {
-  if (leaf === 'sdActive' && outcome?.repeated) return false;
-  return outcomeValues[kind as string]?.includes(leaf) ?? false;
+/** Loss is counted once: a dropout hazard takes the place of attrition. */
+function settleLosses(request: Record<string, Record<string, unknown>>): void {
+  if (request.outcome?.dropoutHazard === undefined || !request.attrition) return;
+  const { participants: _, ...rest } = request.attrition;
+  request.attrition = rest;
 }
 
 function outcomeOf({ question }: Study, { repeated }: OptionPlan): Record<string, unknown> {
   const { outcome } = question;
-  if (outcome.kind === 'continuous')
-    return { ...outcome, ...(repeated ? { repeated: { ...repeated } } : {}) };
-  const { difference: _, ...rest } = outcome;
-  return rest;
+  switch (outcome.kind) {
+    case 'continuous':
+      return { ...outcome, ...(repeated ? { repeated: { ...repeated } } : {}) };
+    case 'binary': {
+      const { difference: _, ...rest } = outcome;
+      return rest;
+    }
+    case 'time-to-event': {
+      const { survivalAt, ...rest } = outcome;
+      return { ...rest, controlSurvival: { at: survivalAt } };
+    }
+    default:
+      return { ...outcome };
+  }
 }
 
 /** The study's costs by treatment, narrowed to those this option compares. */

@@ -1,8 +1,12 @@
 import type { Feasible } from '../appraisal.js';
-import { appraise } from '../appraise.js';
-import type { AppraisalRequest } from '../parse-request.js';
-import { breaks, type LimitKey, type Limits, type Use, usesOf } from './limits.js';
-import { appraiseAt, mostUnits } from './most-units.js';
+import type { Found } from '../numeric/branch-and-bound.js';
+import { bestAt, fitsWithin } from '../optimise/best.js';
+import { isEndless } from '../optimise/most-power.js';
+import { leastReaching, mostPowerful } from '../optimise/searches.js';
+import { loadAt, type Sized, type SizedLoad, type Space, spaceOf } from '../optimise/space.js';
+import { type AppraisalRequest, parseRequest } from '../parse-request.js';
+import { largestCount } from '../request.js';
+import { breaks, type LimitKey, type Limits, loadOf, type Use, usesOf } from './limits.js';
 
 /** How an option stands against the power asked for and the limits. */
 export interface Standing {
@@ -12,7 +16,7 @@ export interface Standing {
   uses: Use[];
   /** The limits it breaks; the first is the binding one. */
   breaches: Use[];
-  /** The most power the limits leave it, where it breaks one, over a spread of cluster sizes. */
+  /** The most power the limits leave it, where it breaks one, over every cluster size. */
   within: {
     units: number;
     clusterSize?: number;
@@ -20,7 +24,7 @@ export interface Standing {
     participants: number;
     power: number;
   } | null;
-  /** The smallest change of limits found that would admit it; none where another cluster size fits as it is. */
+  /** The smallest change of limits that would admit it; none where another cluster size fits as it is. */
   relaxation: { changes: { limit: LimitKey; from: number; to: number }[]; clusterSize?: number } | null;
 }
 
@@ -30,93 +34,87 @@ export function standingOf(
   request: AppraisalRequest,
   appraisal: Feasible,
 ): Standing {
-  const uses = usesOf(limits, request, appraisal);
+  const uses = usesOf(limits, loadOf(request, appraisal));
   const breaches = uses.filter(breaks);
   const reachesPower = appraisal.power >= power - 1e-12;
-  const fits = reachesPower && breaches.length === 0;
+  const standing = { reachesPower, uses, breaches };
+  if (reachesPower && breaches.length === 0)
+    return { ...standing, fits: true, within: null, relaxation: null };
+  const sizes = sizesOf(limits, parseRequest(request), appraisal.clusterSize);
   return {
-    fits,
-    reachesPower,
-    uses,
-    breaches,
-    within: breaches.length === 0 ? null : mostPowerWithin(limits, power, request),
-    relaxation: fits ? null : smallestRelaxation(limits, power, request),
+    ...standing,
+    fits: false,
+    within: breaches.length === 0 ? null : mostPowerWithin(limits, power, sizes),
+    relaxation: smallestRelaxation(limits, power, sizes),
   };
 }
 
-/** Largest analysed cluster size whose recruits still exist, where that is limited. */
-function largestClusterSize(limits: Limits, { attrition }: AppraisalRequest): number | undefined {
-  const { participantsPerCluster } = limits;
-  if (participantsPerCluster === undefined) return undefined;
-  return Math.max(1, Math.floor(participantsPerCluster * (1 - (attrition?.participants ?? 0)) + 1e-9));
+/** The sizes an option may take: any cluster size where that has a limit, else up to its own. */
+interface Sizes {
+  space: Space;
+  own: number | undefined;
 }
 
-/** The option's own cluster size and others spread over what the limits allow, where there is one to choose. */
-function clusterSizesWithin(limits: Limits, request: AppraisalRequest): (number | undefined)[] {
-  if (!('clusterSize' in request.design)) return [undefined];
-  const own = request.design.clusterSize;
-  const largest = largestClusterSize(limits, request) ?? own;
-  const spread = Array.from({ length: 8 }, (_, step) => Math.ceil(largest ** ((step + 1) / 8)));
-  return [...new Set([Math.min(own, largest), ...spread])];
+function sizesOf(limits: Limits, request: AppraisalRequest, own: number | undefined): Sizes {
+  if (own === undefined) return { space: spaceOf(request, {}), own };
+  const to = limits.participantsPerCluster === undefined ? own : largestCount;
+  return { space: spaceOf(request, { clusterSize: { from: 1, to } }), own };
 }
 
-/** The most power among sizes that break no limit; where nothing limits the number, the size the power asks for. */
-function mostPowerWithin(limits: Limits, power: number, request: AppraisalRequest): Standing['within'] {
-  const fits = (appraisal: Feasible) => !usesOf(limits, request, appraisal).some(breaks);
-  const candidates = clusterSizesWithin(limits, request).flatMap((clusterSize) => {
-    const units = mostUnits(request, fits, clusterSize);
-    if (units === 0) return [];
-    if (Number.isFinite(units)) return [appraiseAt(request, units, clusterSize)];
-    const sized = appraise(sizedFor(power, request, clusterSize));
-    return sized.feasible ? [sized] : [];
-  });
-  const best = candidates.reduce<Feasible | null>(
-    (most, each) => (most && most.power >= each.power ? most : each),
-    null,
-  );
-  if (!best) return null;
-  const { units, clusterSize, clusters, participants } = best;
+/** The most power among sizes that break no limit; where nothing limits the number, the fewest that reach it. */
+function mostPowerWithin(limits: Limits, power: number, { space }: Sizes): Standing['within'] {
+  const fits = fitsWithin(limits);
+  const { found } = isEndless(space, fits)
+    ? leastReaching(space, power, (load) => (fits(load) ? [load.clusters ?? 0, load.recruited] : undefined))
+    : mostPowerful(space, fits);
+  const best = found && bestAt(found.at, true);
+  if (!best?.found) return null;
+  const { units, clusterSize, clusters, participants, power: reached } = best.appraisal;
   return {
     units,
     participants,
-    power: best.power,
+    power: reached,
     ...(clusterSize && { clusterSize }),
     ...(clusters && { clusters }),
   };
 }
 
+type BreachScore = [limits: number, share: number, clusters: number, recruits: number];
+
 /**
- * The limits that would have to move, and how far: at each of the cluster sizes above the design is sized for the
- * power, and the one that breaks the fewest limits, by the smallest share, is taken; its own size where it ties.
+ * The limits that would have to move, and how far: of all sizes that reach the power those that break the fewest
+ * limits, of these by the smallest share, of these the option's own cluster size, else the fewest clusters.
  */
-function smallestRelaxation(
-  limits: Limits,
-  power: number,
-  request: AppraisalRequest,
-): Standing['relaxation'] {
-  const ways = clusterSizesWithin(limits, request).flatMap((clusterSize) => {
-    const appraisal = appraise(sizedFor(power, request, clusterSize));
-    if (!appraisal.feasible) return [];
-    const breaches = usesOf(limits, request, appraisal).filter(breaks);
+function smallestRelaxation(limits: Limits, power: number, { space, own }: Sizes): Standing['relaxation'] {
+  const breachesOf = (load: SizedLoad) => usesOf(limits, load).filter(breaks);
+  const score = (load: SizedLoad): BreachScore => {
+    const breaches = breachesOf(load);
     const share = Math.max(0, ...breaches.map(({ over, allowed }) => over / allowed));
-    return [{ clusterSize, breaches, share }];
-  });
-  const [least] = ways.sort((a, b) => a.breaches.length - b.breaches.length || a.share - b.share);
-  if (!least) return null;
-  const own = 'clusterSize' in request.design ? request.design.clusterSize : undefined;
+    return [breaches.length, share, load.clusters ?? 0, load.recruited];
+  };
+  const { found } = leastReaching(space, power, score, ownSize(space, power, own, score));
+  if (!found) return null;
+  const { clusterSize } = found.at;
   return {
-    changes: least.breaches.map(({ limit, allowed, taken }) => ({ limit, from: allowed, to: taken })),
-    ...(least.clusterSize !== undefined && least.clusterSize !== own
-      ? { clusterSize: least.clusterSize }
-      : {}),
+    changes: breachesOf(loadAt(found.at)).map(({ limit, allowed, taken }) => ({
+      limit,
+      from: allowed,
+      to: taken,
+    })),
+    ...(clusterSize === undefined || clusterSize === own ? {} : { clusterSize }),
   };
 }
 
-function sizedFor(
+/** The option at its own cluster size, which only a smaller relaxation replaces. */
+function ownSize(
+  space: Space,
   power: number,
-  request: AppraisalRequest,
-  clusterSize: number | undefined,
-): AppraisalRequest {
-  const design = clusterSize === undefined ? request.design : { ...request.design, clusterSize };
-  return { ...request, design, aim: { find: 'size', power } } as AppraisalRequest;
+  own: number | undefined,
+  score: (load: SizedLoad) => BreachScore,
+): Found<Sized> | undefined {
+  const outer = own === undefined ? [] : [own];
+  const { found } = leastReaching({ ...space, box: { low: outer, high: outer } }, power, score);
+  if (!found) return undefined;
+  const [count, share] = score(loadAt(found.at));
+  return { at: found.at, score: [count, share, 0, 0] };
 }

@@ -1,31 +1,7 @@
 import { z } from 'zod';
 import { familyIds } from '../designs/registry.js';
-import {
-  costPlanSchema,
-  openProportion,
-  positive,
-  quantity,
-  testSchema,
-  timelinePlanSchema,
-  wholeNumber,
-} from '../request.js';
+import { costPlanSchema, openProportion, positive, timelinePlanSchema, wholeNumber } from '../request.js';
 import { planningValueKeys } from './planning-values.js';
-
-/** What the study asks: the outcome with its target difference, and the test. The rest comes from the ledger. */
-export const questionOutcomeSchema = z.discriminatedUnion('kind', [
-  z.strictObject({
-    kind: z.literal('continuous'),
-    difference: quantity('The target difference'),
-    better: z.enum(['higher', 'lower']).optional(),
-  }),
-  z.strictObject({
-    kind: z.literal('binary'),
-    /** active − control proportion */
-    difference: quantity('The target difference', -1, 1),
-    method: z.enum(['pooled', 'unpooled', 'continuity-corrected', 'arcsine']).optional(),
-    better: z.enum(['higher', 'lower']).optional(),
-  }),
-]);
 
 const power = openProportion('The power');
 
@@ -61,6 +37,8 @@ export const optionPlanSchema = z.strictObject({
   /** Units and cluster size as entered: what the hold "sizes" keeps. */
   units: wholeNumber('The number of units', 1).optional(),
   clusterSize: wholeNumber('The cluster size', 1).optional(),
+  /** Why several comparisons are adjusted for, and powered, as they are. */
+  multiplicityReason: z.string().max(1000, 'Give the reason in 1000 characters or fewer.').optional(),
   overrides: z.partialRecord(z.enum(planningValueKeys), overrideSchema),
 });
 
@@ -74,12 +52,8 @@ export const ledgerEntrySchema = z.strictObject({
 /** Money and months; `perExposure` and `perClusterPeriod` go by the study's list of treatments. */
 export const studyCostsSchema = z.strictObject({ costs: costPlanSchema, timeline: timelinePlanSchema });
 
-export type QuestionOutcome = z.infer<typeof questionOutcomeSchema>;
 export type Hold = z.infer<typeof holdSchema>;
 export type Ruling = z.infer<typeof rulingSchema>;
 export type OptionPlan = z.infer<typeof optionPlanSchema>;
 export type LedgerEntry = z.infer<typeof ledgerEntrySchema>;
 export type StudyCosts = z.infer<typeof studyCostsSchema>;
-
-export const questionPlanSchema = z.strictObject({ outcome: questionOutcomeSchema, test: testSchema });
-export type QuestionPlan = z.infer<typeof questionPlanSchema>;

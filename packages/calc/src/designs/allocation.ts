@@ -1,3 +1,5 @@
+import type { Reallocation } from './family.js';
+
 /** Smallest whole number not below x, forgiving 1e-9 so that 3 × (1/3) × 60 stays 60. */
 export function ceilForgiving(x: number): number {
   return Math.ceil(x - 1e-9);
@@ -17,6 +19,20 @@ export function minimumBaseUnits(allocation: readonly number[], least = 2): numb
   return units;
 }
 
+/** Control against the active arms, whose shares among each other stay as they are. */
+export function armsReallocated<D extends { allocation?: number[] | undefined }>(
+  design: D,
+  [, first = 1, ...others]: readonly number[] = [1, 1],
+): Reallocation<D> {
+  const shares = [1, ...others.map((share) => share / first)];
+  return {
+    base: 'control',
+    perUnit: 1,
+    fewestOpposite: minimumBaseUnits(shares),
+    at: (units, opposite) => ({ ...design, allocation: [units, ...shares.map((share) => share * opposite)] }),
+  };
+}
+
 /**
  * How far below a bisection's answer a smaller size may still reach the aim: rounding lifts a group by up to
  * one unit, worth 1/ratio units of the base group. None where every ratio is whole, since nothing is rounded.
@@ -33,10 +49,10 @@ export function recruitedFor(analysed: number, lost: number | undefined): number
   return ceilForgiving(analysed / (1 - (lost ?? 0)));
 }
 
+const twoArms: readonly string[] = ['Control', 'Active'];
+
 /** "Control", "Active" or "Active 1", "Active 2"… */
-export function armLabels(count: number): string[] {
-  return Array.from({ length: count }, (_, arm) => {
-    if (arm === 0) return 'Control';
-    return count === 2 ? 'Active' : `Active ${arm}`;
-  });
+export function armLabels(count: number): readonly string[] {
+  if (count === 2) return twoArms;
+  return Array.from({ length: count }, (_, arm) => (arm === 0 ? 'Control' : `Active ${arm}`));
 }

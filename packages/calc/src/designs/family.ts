@@ -1,9 +1,10 @@
 import type { z } from 'zod';
 import type { Caution, Group, Step } from '../appraisal.js';
-import type { PlanningValueKey } from '../comparison/planning-values.js';
+import type { PlanningValuePlace } from '../comparison/planning-values.js';
 import type { OutcomeModel } from '../outcomes/outcome-model.js';
 import type { Comparisons, Hypothesis, OutcomeKind, RequestFor } from '../request.js';
 import type { Analysis } from '../tests/analysis.js';
+import type { Lever } from './levers.js';
 
 /** Everything Steelyard knows of one kind of design: its schema, what it combines with, and its plan. */
 export interface Family<D> {
@@ -12,9 +13,22 @@ export interface Family<D> {
   /** The hypotheses it answers, by outcome; what is not listed is a CalcError. */
   combines: Partial<Record<OutcomeKind, readonly Hypothesis[]>>;
   /** Where in the request each of the ledger's planning values goes. */
-  planningValues: readonly { path: string; key: PlanningValueKey }[];
+  planningValues: readonly PlanningValuePlace[];
+  /** Changes of an option that may cut its participants. */
+  levers?: readonly Lever[];
   /** Binds the formula to one request. Throws CalcError where the method's conditions are not met. */
   plan(request: RequestFor<D>): DesignPlan;
+  /** How the shares of control and active arms change; none where groups are not arms, or always equal. */
+  reallocation?(design: D): Reallocation<D>;
+}
+
+/** A design with any number of units in its base group, and any number in the (first) group opposite. */
+export interface Reallocation<D> {
+  base: 'control' | 'active';
+  /** What one unit of the base group counts against one of the group opposite. */
+  perUnit: number;
+  fewestOpposite: number;
+  at(units: number, opposite: number): D;
 }
 
 /** A family's formula bound to one request: effect, standard error and df at any size follow from it. */
@@ -32,15 +46,19 @@ export interface DesignPlan {
   lookBelow: number;
   /** Two equal parallel arms, whose equation has a real-valued solution too. */
   equalPair?: boolean;
-  /** Participants analysed per cluster; undefined where individuals are randomised. */
+  /** Participants analysed per cluster, where it is one number that may be asked for. */
   clusterSize?: number | undefined;
+  /** Can whole clusters be lost? */
+  losesClusters?: boolean;
   groupUnits(units: number): number[];
   /** Group sizes may be real; one outcome model per active arm. */
   analyse(groupUnits: readonly number[], outcomes: readonly OutcomeModel[], clusterSize?: number): Analysis;
   layout(units: number, clusterSize?: number): Layout;
-  /** How months pass after recruitment: one follow-up, or periods with washouts between. */
-  periods?: number;
-  designEffect?(clusterSize: number): number;
+  /** Periods instead of one follow-up: after recruitment with washouts between, or with recruitment within each. */
+  periods?: { count: number; recruitment: 'before' | 'within' };
+  designEffect?(result: WorkedSize): number | undefined;
+  /** Events that the aim requires and that the size leads one to expect, of a time-to-event outcome. */
+  events?(result: WorkedSize, outcomes: readonly OutcomeModel[]): { required?: number; expected: number };
   cautions(layout: Layout, outcomes: readonly OutcomeModel[]): Caution[];
   /** The lines of the working that are this family's own: from the effect to the standard error and df. */
   steps(result: WorkedSize, outcomes: readonly OutcomeModel[]): Step[];

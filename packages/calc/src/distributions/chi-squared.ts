@@ -104,6 +104,8 @@ interface GammaTails {
  */
 function gammaTails(a: number, x: number): GammaTails {
   const density = Math.sqrt(a / (2 * Math.PI)) * Math.exp(-stirlingError(a) - deviance(a, x));
+  // A tail without density is empty; far enough out its integral has no scale left to be summed on.
+  if (density === 0) return x < a ? { lower: 0, upper: 1, density } : { lower: 1, upper: 0, density };
   if (x < Math.max(a, 1)) {
     const reach =
       a < 10 ? powerSeries(a, x) : tailIntegral((u) => (a - x) * u + x * exponentialRemainder(-u), a - x, x);

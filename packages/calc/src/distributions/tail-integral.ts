@@ -24,6 +24,8 @@ export function tailIntegral(fall: (u: number) => number, slope: number, bend: n
   let beyond = length;
   while (!(reached >= depth && reached <= 1.3 * depth)) {
     length = 0.5 * (within + beyond);
+    // So far out that no double lies where `fall` is of that height.
+    if (!(within < length && length < beyond)) break;
     reached = fall(length);
     if (reached < depth) within = length;
     else beyond = length;

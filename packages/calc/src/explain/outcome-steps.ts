@@ -2,15 +2,37 @@ import type { Step } from '../appraisal.js';
 import { repeatedMeasuresFactor } from '../outcomes/continuous.js';
 import type { OutcomeModel } from '../outcomes/outcome-model.js';
 import type { AppraisalRequest } from '../parse-request.js';
-import type { ContinuousOutcome } from '../request.js';
+import type { ContinuousOutcome, Outcome } from '../request.js';
+import { countOutcomeSteps, ordinalOutcomeSteps, timeToEventOutcomeSteps } from './ratio-steps.js';
 import { tex, texFactor } from './tex.js';
 
 /** The lines of the working that belong to the outcome: its effect after dilution, and its variance. */
 export function outcomeSteps(request: AppraisalRequest, model: OutcomeModel): Step[] {
   const { outcome } = request;
-  if (outcome.kind === 'continuous')
-    return [differenceStep(request, model), ...varianceSteps(outcome, model)];
-  return proportionSteps(request, model);
+  switch (outcome.kind) {
+    case 'continuous':
+      return [differenceStep(request, model), ...varianceSteps(outcome, model)];
+    case 'binary':
+      return proportionSteps(request, model);
+    case 'time-to-event':
+      return [logRatioStep(request, model), ...timeToEventOutcomeSteps(outcome, model)];
+    case 'count':
+      return [logRatioStep(request, model), ...countOutcomeSteps(outcome, model)];
+    case 'ordinal':
+      return [logRatioStep(request, model), ...ordinalOutcomeSteps(outcome, model)];
+  }
+}
+
+/** What the outcome calls its target, as in “detectable hazard ratio”; all before dilution. */
+export function targetName({ kind }: Outcome): string {
+  const names: Record<Outcome['kind'], string> = {
+    continuous: 'difference, before dilution',
+    binary: 'active proportion',
+    'time-to-event': 'hazard ratio, before dilution',
+    count: 'rate ratio, before dilution',
+    ordinal: 'odds ratio, before dilution',
+  };
+  return names[kind];
 }
 
 /** Where the target comes from: the question, or the answer itself where the aim is the effect. */
@@ -33,6 +55,18 @@ function differenceStep(request: AppraisalRequest, model: OutcomeModel): Step {
     label: `${name} difference${dilution ? ', after dilution' : ''}`,
     formula: dilution ? `\\delta=(\\mu_1-\\mu_0)${share}` : '\\delta=\\mu_1-\\mu_0',
     substituted: dilution ? `${texFactor(model.target)}\\times${sharePut(request)}` : tex(model.target),
+    value: model.effect,
+    source,
+  };
+}
+
+function logRatioStep(request: AppraisalRequest, model: OutcomeModel): Step {
+  const { name, source } = targetOf(request);
+  const [ratio = ''] = targetName(request.outcome).split(',');
+  return {
+    label: `${name} ${ratio}, on the log scale${request.dilution ? ', after dilution' : ''}`,
+    formula: request.dilution ? `\\delta=${share}\\log\\psi` : '\\delta=\\log\\psi',
+    substituted: `${request.dilution ? sharePut(request) : ''}\\log ${tex(model.target)}`,
     value: model.effect,
     source,
   };
@@ -108,11 +142,14 @@ function varianceSteps(outcome: ContinuousOutcome, model: OutcomeModel): Step[] 
     }));
   }
   const { baselines: p, followUps: m, correlation: rho } = repeated;
+  const put = texFactor(rho);
+  const followUps = `\\frac{1+${m - 1}\\times${put}}{${m}}`;
   return [
     {
       label: 'Share of the variance left by the repeated measurements',
-      formula: 'f=\\frac{1+(m-1)\\rho}{m}-\\frac{p\\rho^2}{1+(p-1)\\rho}',
-      substituted: `\\frac{1+${m - 1}\\times${texFactor(rho)}}{${m}}-\\frac{${p}\\times${texFactor(rho)}^2}{1+${p - 1}\\times${texFactor(rho)}}`,
+      formula:
+        p === 0 ? 'f=\\frac{1+(m-1)\\rho}{m}' : 'f=\\frac{1+(m-1)\\rho}{m}-\\frac{p\\rho^2}{1+(p-1)\\rho}',
+      substituted: p === 0 ? followUps : `${followUps}-\\frac{${p}\\times${put}^2}{1+${p - 1}\\times${put}}`,
       value: repeatedMeasuresFactor(repeated),
       source: 'Frison & Pocock 1992, Stat Med 11:1685; Borm, Fransen & Lemmens 2007',
     },

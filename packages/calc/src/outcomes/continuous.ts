@@ -42,6 +42,7 @@ export function continuousModel(outcome: ContinuousOutcome, dilution: number): O
   const at = (target: number): OutcomeModel => ({
     kind: 'continuous',
     target,
+    targetPath: 'outcome.difference',
     nullTarget: 0,
     targetLimit: Math.sign(outcome.difference || 1) * Number.POSITIVE_INFINITY,
     effect: target * dilution,

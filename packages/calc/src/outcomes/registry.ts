@@ -1,18 +1,29 @@
-import { CalcError } from '../errors.js';
-import type { Dilution, Outcome } from '../request.js';
+import type { Dilution, RequestFor } from '../request.js';
 import { binaryModel } from './binary.js';
 import { continuousModel } from './continuous.js';
+import { countModel } from './count.js';
+import { ordinalModel } from './ordinal.js';
 import type { OutcomeModel } from './outcome-model.js';
+import { timeToEventModel } from './time-to-event.js';
 
 /** Share of the effect that contamination and non-adherence leave. */
 export function remainingShare(dilution: Dilution | undefined): number {
   return (1 - (dilution?.contamination ?? 0)) * (1 - (dilution?.nonAdherence ?? 0));
 }
 
-/** The outcome of a request, after dilution. Throws CalcError `unsupported` for kinds that are not computed. */
-export function outcomeModel(outcome: Outcome, dilution?: Dilution): OutcomeModel {
+/** The outcome of a request, after dilution. Throws CalcError where an outcome's own conditions do not hold. */
+export function outcomeModel({ outcome, dilution, test, attrition }: RequestFor<unknown>): OutcomeModel {
   const share = remainingShare(dilution);
-  if (outcome.kind === 'continuous') return continuousModel(outcome, share);
-  if (outcome.kind === 'binary') return binaryModel(outcome, share);
-  throw new CalcError('unsupported', 'outcome.kind', `A ${outcome.kind} outcome is not computed yet.`);
+  switch (outcome.kind) {
+    case 'continuous':
+      return continuousModel(outcome, share);
+    case 'binary':
+      return binaryModel(outcome, share, test.hypothesis);
+    case 'time-to-event':
+      return timeToEventModel(outcome, share, test.hypothesis, attrition);
+    case 'count':
+      return countModel(outcome, share);
+    case 'ordinal':
+      return ordinalModel(outcome, share);
+  }
 }

@@ -1,4 +1,5 @@
 import type { Timeline } from '../appraisal.js';
+import type { DesignPlan } from '../designs/family.js';
 import type { TimelinePlan } from '../request.js';
 
 export interface Recruitment {
@@ -10,12 +11,13 @@ export interface Recruitment {
  * Months from start-up to close-out; a phase whose figure is missing is left out and named in `missing`.
  *
  * Formula: recruitment = recruited / accrual per month, or the recruited size of a cluster over its own
- * accrual; then one follow-up, or `periods` periods with a washout between each two. Units: months, real.
+ * accrual; then one follow-up, or periods with a washout between each two. Clusters that recruit within their
+ * periods have neither. Units: months, real.
  */
 export function scheduleOf(
   plan: TimelinePlan,
   { recruited, recruitedPerCluster }: Recruitment,
-  periods: number | undefined,
+  periods: DesignPlan['periods'],
 ): { timeline: Timeline; missing: string[] } {
   const phases: Timeline['phases'] = [];
   const missing: string[] = [];
@@ -30,12 +32,14 @@ export function scheduleOf(
   };
 
   add('Start-up', plan.startUp, 'start-up');
-  add('Recruitment', recruitmentMonths(plan, recruited, recruitedPerCluster), 'accrual');
+  const within = periods?.recruitment === 'within';
+  if (!within) add('Recruitment', recruitmentMonths(plan, recruited, recruitedPerCluster), 'accrual');
   if (periods === undefined) {
     add('Follow-up', plan.followUp, 'follow-up');
   } else {
-    for (let period = 1; period <= periods; period += 1) {
-      if (period > 1 && plan.washout !== undefined) add(`Washout ${period - 1}`, plan.washout, 'washout');
+    for (let period = 1; period <= periods.count; period += 1) {
+      if (!within && period > 1 && plan.washout !== undefined)
+        add(`Washout ${period - 1}`, plan.washout, 'washout');
       add(`Period ${period}`, plan.period, 'period');
     }
   }

@@ -52,6 +52,15 @@ describe('the chi-squared distribution', () => {
     }
   });
 
+  it('is at its limit, and at once, however far out', () => {
+    for (const df of [0.1, 5, 78, 1e6, 1e12]) {
+      for (const x of [1e18, 1e150, 1e200, Number.MAX_VALUE]) {
+        expect([chiSquaredCdf(x, df), chiSquaredUpper(x, df)]).toEqual([1, 0]);
+      }
+      if (df > 10) expect([chiSquaredCdf(1e-300, df), chiSquaredUpper(1e-300, df)]).toEqual([0, 1]);
+    }
+  });
+
   it('gives NaN for NaN, df that are not positive and finite, and probabilities outside 0 to 1', () => {
     for (const f of [chiSquaredCdf, chiSquaredUpper, chiSquaredQuantile, chiSquaredUpperQuantile]) {
       expect(f(Number.NaN, 5)).toBeNaN();

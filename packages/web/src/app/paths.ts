@@ -12,7 +12,9 @@ export const paths = {
   history: (studyId: string) => `/studies/${studyId}/history`,
   profile: '/profile',
   admin: '/admin',
-  working: (studyId: string, optionId: string) => `/studies/${studyId}/options/${optionId}`,
+  /** With the person's edits, unless what is stored is asked for. */
+  working: (studyId: string, optionId: string, version?: 'stored') =>
+    `/studies/${studyId}/options/${optionId}${version ? `?version=${version}` : ''}`,
 };
 
 /** Signing in, and back to where one came from. */

@@ -1,17 +1,19 @@
 import { MutationCache, QueryCache, QueryClient } from '@tanstack/react-query';
+import { sessionQuery } from '../features/access/api/access';
 import { ApiError } from '../shared/api/client';
 
-/** Queries and changes of this application; `onSignedOut` hears of any that finds the session ended. */
-export function createQueryClient(onSignedOut: () => void): QueryClient {
+/** Queries and changes of this application; whichever finds the session ended makes it known to all. */
+export function createQueryClient(): QueryClient {
+  const signedOut = () => void queryClient.setQueryData(sessionQuery().queryKey, null);
   const queryClient = new QueryClient({
     queryCache: new QueryCache({
       onError: (error) => {
-        if (statusOf(error) === 401) onSignedOut();
+        if (statusOf(error) === 401) signedOut();
       },
     }),
     mutationCache: new MutationCache({
       onError: (error) => {
-        if (statusOf(error) === 401) onSignedOut();
+        if (statusOf(error) === 401) signedOut();
         // What was to be changed is gone, or no longer open to this person: the page must learn of it too.
         if (statusOf(error) === 404) void queryClient.invalidateQueries({ queryKey: ['studies'] });
       },

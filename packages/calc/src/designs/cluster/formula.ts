@@ -19,3 +19,13 @@ export function designEffect(icc: number, clusterSize: number, clusterSizeCv = 0
 export function variancePerCluster(icc: number, clusterSize: number, clusterSizeCv = 0): number {
   return (1 - icc) / clusterSize + icc * (1 + clusterSizeCv ** 2);
 }
+
+/**
+ * Variance of the log of one cluster's event rate; its limit κ² where clusters grow without end.
+ *
+ * Formula: 1/(λ·t·m) + κ². Source: after Hayes & Bennett 1999, Int J Epidemiol 28:319.
+ * Units: `variance` = 1/(λt), of one participant; κ is the between-cluster coefficient of variation of the rate.
+ */
+export function rateVariancePerCluster(variance: number, rateCv: number, clusterSize: number): number {
+  return variance / clusterSize + rateCv ** 2;
+}

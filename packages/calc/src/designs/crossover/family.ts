@@ -1,153 +1,154 @@
-import type { Caution, Step } from '../../appraisal.js';
 import { CalcError } from '../../errors.js';
-import { tex, texFactor } from '../../explain/tex.js';
 import type { OutcomeModel } from '../../outcomes/outcome-model.js';
-import type { ContinuousOutcome, RequestFor } from '../../request.js';
-import { recruitedFor } from '../allocation.js';
+import { remainingShare } from '../../outcomes/registry.js';
+import type { Comparisons, RequestFor } from '../../request.js';
+import { armLabels, recruitedFor } from '../allocation.js';
 import type { DesignPlan, Family, Layout } from '../family.js';
-import { individualPlanningValues } from '../planning-values.js';
-import { abbaStandardError } from './formula.js';
-import { type CrossoverDesign, crossoverSchema } from './schema.js';
+import { requirePlainOutcome } from '../plain-outcome.js';
+import { commonPlanningValues } from '../planning-values.js';
+import { pairedContrast, requirePossiblePair } from './binary.js';
+import { crossoverCautions } from './cautions.js';
+import { crossoverDf, type TreatmentInformation, treatmentInformation } from './formula.js';
+import { type CrossoverDesign, crossoverSchema, lettersOf } from './schema.js';
+import { meanSteps, proportionSteps } from './steps.js';
 
-/** Each participant receives both treatments, in one order or the other. */
+/** Each participant receives several treatments, in one of several sequences. */
 export const crossover: Family<CrossoverDesign> = {
   name: 'Crossover',
   schema: crossoverSchema,
-  combines: { continuous: ['superiority'] },
-  planningValues: [
-    ...individualPlanningValues,
-    { path: 'design.correlation', key: 'withinPersonCorrelation' },
-  ],
+  combines: { continuous: ['superiority', 'non-inferiority', 'equivalence'], binary: ['superiority'] },
+  planningValues: [...commonPlanningValues, { path: 'design.correlation', key: 'withinPersonCorrelation' }],
   plan(request) {
-    refuseOtherSequences(request.design);
-    const outcome = plainContinuous(request);
-    const { correlation } = request.design;
+    refuseOutcome(request);
+    const { design } = request;
+    const { sequences, correlation, carryover = false } = design;
+    const arms = armLabels(lettersOf(sequences).length);
+    const periods = sequences[0]?.length ?? 0;
+    const information = estimable(sequences, carryover);
+    const binary = request.outcome.kind === 'binary';
+    if (binary) requirePair(request);
+    else requirePossibleCorrelation(correlation, periods);
+    const dfAt = (units: number) => crossoverDf(units * sequences.length, periods, arms.length, carryover);
     return {
       unitName: 'participants in each sequence',
-      arms: ['Control', 'Active'],
-      comparisons: request.design.comparisons,
-      hasDf: true,
+      arms,
+      comparisons: comparisonsOf(design, arms.length),
+      hasDf: !binary,
+      // Two in each sequence always leave a df: S(T−1) ≥ (T−1) + what is fitted, or nothing could be estimated.
       minimumUnits: 2,
       lookBelow: 0,
-      periods: 2,
-      groupUnits: (units) => [units, units],
-      analyse: ([first = 0, second = 0], [model]) => ({
-        df: first + second - 2,
-        contrasts: [
-          {
-            arm: 1,
-            versus: 0,
-            effect: (model as OutcomeModel).effect,
-            standardError: abbaStandardError(outcome.sd, correlation, first + second),
-          },
-        ],
-      }),
-      layout: (units) => crossoverLayout(request, units),
-      cautions: () => crossoverCautions(request),
-      steps: ({ groupUnits, analysis }) => steps(outcome.sd, correlation, groupUnits, analysis),
-    };
+      periods: { count: periods, recruitment: 'before' },
+      groupUnits: (units) => sequences.map(() => units),
+      analyse: binary
+        ? ([units = 0], [model]) => ({
+            df: null,
+            contrasts: [pairedContrast(model as OutcomeModel, correlation, 2 * units)],
+          })
+        : ([units = 0], outcomes) => ({
+            df: dfAt(units),
+            contrasts: outcomes.map(({ effect, variances }, k) => ({
+              arm: k + 1,
+              versus: 0,
+              effect,
+              standardError: Math.sqrt(
+                (variances[0] * (1 - correlation) * (information.variances?.[k] as number)) / units,
+              ),
+            })),
+          }),
+      layout: (units) => crossoverLayout(request, arms, units),
+      cautions: (layout, outcomes) => crossoverCautions(request, layout, outcomes),
+      steps: (result, outcomes) =>
+        binary ? proportionSteps(design, result, outcomes) : meanSteps(design, information, result, outcomes),
+    } satisfies DesignPlan;
   },
 };
 
-function refuseOtherSequences({ sequences, carryover }: CrossoverDesign): void {
-  if ([...sequences].sort().join('/') !== 'AB/BA') {
+function refuseOutcome({ outcome }: RequestFor<CrossoverDesign>): void {
+  if (outcome.kind === 'binary' && outcome.method !== undefined) {
     throw new CalcError(
       'unsupported',
-      'design.sequences',
-      'Only the two sequences AB and BA are computed yet, each named once.',
+      'outcome.method',
+      'In a crossover both proportions come from the same participants and are compared as pairs; leave the method out.',
     );
   }
-  if (carryover) {
+  requirePlainOutcome(outcome);
+}
+
+/** What the sequences tell of the treatments. Throws CalcError `not-estimable` with the reason. */
+function estimable(sequences: readonly string[], carryover: boolean): TreatmentInformation {
+  const information = treatmentInformation(sequences, carryover);
+  if (information.variances) return information;
+  const { notEstimable } = carryover ? treatmentInformation(sequences, false) : information;
+  if (notEstimable === undefined) {
     throw new CalcError(
       'not-estimable',
       'design.carryover',
-      'In AB/BA a carryover effect cannot be told from the treatment effect within participants: plan a washout, or choose other sequences.',
+      `In ${sequences.join('/')} a carryover effect cannot be told from the treatment effect within participants: plan a washout and leave carryover out, or choose sequences with more periods, such as ABB and BAA.`,
     );
   }
+  throw new CalcError(
+    'not-estimable',
+    'design.sequences',
+    `In ${sequences.join('/')} the difference of ${notEstimable} from A cannot be told within participants from that between the periods or other treatments: let participants receive both, in different orders, such as AB and BA.`,
+  );
 }
 
-function plainContinuous({ outcome }: RequestFor<CrossoverDesign>): ContinuousOutcome {
-  const continuous = outcome as ContinuousOutcome;
-  const extra = continuous.sdActive !== undefined ? 'sdActive' : continuous.repeated ? 'repeated' : undefined;
-  if (extra) {
+/** Proportions are compared in AB/BA only, as pairs. */
+function requirePair({ design, outcome, dilution }: RequestFor<CrossoverDesign>): void {
+  if ([...design.sequences].sort().join('/') !== 'AB/BA') {
     throw new CalcError(
       'unsupported',
-      `outcome.${extra}`,
-      extra === 'sdActive'
-        ? 'A crossover is planned with one SD for both treatments; leave the active arm’s SD out.'
-        : 'A crossover already compares each participant with themselves; leave the repeated measurements out.',
+      'design.sequences',
+      'Proportions are compared in the two sequences AB and BA only, each named once.',
     );
   }
-  return continuous;
+  if (outcome.kind !== 'binary') return;
+  const { control, active } = outcome;
+  requirePossiblePair(control, control + (active - control) * remainingShare(dilution), design.correlation);
 }
 
-function crossoverLayout({ design, attrition }: RequestFor<CrossoverDesign>, units: number): Layout {
+function requirePossibleCorrelation(correlation: number, periods: number): void {
+  const lowest = -1 / (periods - 1);
+  if (correlation > lowest) return;
+  throw new CalcError(
+    'impossible-correlation',
+    'design.correlation',
+    `${periods} periods cannot all have a correlation of ${correlation} with each other; it must be above ${lowest.toPrecision(3)}.`,
+  );
+}
+
+/** More than two treatments are each compared with A; left unsaid, without adjustment. */
+function comparisonsOf({ comparisons }: CrossoverDesign, treatments: number): Comparisons | undefined {
+  if (!comparisons) {
+    return treatments > 2 ? { against: 'control', adjust: 'none', powerGoal: 'per-comparison' } : undefined;
+  }
+  const refuse = (field: keyof Comparisons, message: string) =>
+    new CalcError('unsupported', `design.comparisons.${field}`, message);
+  if (comparisons.against !== 'control') {
+    throw refuse('against', 'In a crossover each treatment is compared with A, the control.');
+  }
+  if (comparisons.adjust !== 'none' && comparisons.adjust !== 'bonferroni') {
+    throw refuse('adjust', 'The comparisons of a crossover are left unadjusted or adjusted by Bonferroni.');
+  }
+  if (comparisons.powerGoal !== 'per-comparison') {
+    throw refuse('powerGoal', 'The power of a crossover is computed per comparison.');
+  }
+  return comparisons;
+}
+
+function crossoverLayout(
+  { design, attrition }: RequestFor<CrossoverDesign>,
+  arms: readonly string[],
+  units: number,
+): Layout {
   const recruited = recruitedFor(units, attrition?.participants);
-  const exposures = recruited * design.sequences.length;
+  const given = design.sequences.join('');
   return {
     groups: design.sequences.map((label) => ({ label, units, participants: units, recruited })),
-    arms: ['Control', 'Active'].map((label) => ({
-      label,
-      exposures,
-      measurements: exposures,
-      clusterPeriods: 0,
-    })),
-  };
-}
-
-function crossoverCautions({ attrition, timeline }: RequestFor<CrossoverDesign>): Caution[] {
-  const cautions: Caution[] = [
-    {
-      code: 'carryover',
-      message:
-        'No carryover from the first period into the second is assumed. A carryover of a share of the effect biases the estimate by half that share; testing for it first does not help.',
-      source: 'Senn 2002',
-    },
-  ];
-  if (!timeline?.washout) {
-    cautions.push({
-      code: 'no-washout',
-      message:
-        'No washout between the periods is planned. State one, and what it rests on, or why none is needed.',
-      source: 'Jones & Kenward 2014',
-    });
-  }
-  if (attrition?.participants) {
-    cautions.push({
-      code: 'completers-only',
-      message:
-        'Only participants who complete both periods are analysed; those lost after one period are replaced in the number recruited, and add nothing.',
-      source: 'Senn 2002',
-    });
-  }
-  return cautions;
-}
-
-function steps(
-  sd: number,
-  correlation: number,
-  sizes: readonly number[],
-  analysis: ReturnType<DesignPlan['analyse']>,
-): Step[] {
-  const participants = sizes.reduce((sum, size) => sum + size, 0);
-  return [
-    {
-      label: 'Standard error of the effect, within participants',
-      formula: '\\mathrm{SE}=\\sigma\\sqrt{\\frac{2(1-\\rho)}{N}}',
-      substituted: `${tex(sd)}\\sqrt{\\frac{2(1-${texFactor(correlation)})}{${tex(participants)}}}`,
-      value: analysis.contrasts[0]?.standardError as number,
-      source: 'Senn 2002; Jones & Kenward 2014',
-    },
-    ...(analysis.df === null ? [] : [dfStep(participants, analysis.df)]),
-  ];
-}
-
-function dfStep(participants: number, df: number): Step {
-  return {
-    label: 'Degrees of freedom',
-    formula: '\\nu=N-2',
-    substituted: `${tex(participants)}-2`,
-    value: df,
-    source: 'Jones & Kenward 2014: participants, periods and treatment fitted',
+    arms: arms.map((label, arm) => {
+      const occurrences = [...given].filter((letter) => letter === 'ABCDEFGHIJ'[arm]).length;
+      const exposures = recruited * occurrences;
+      return { label, exposures, measurements: exposures, clusterPeriods: 0 };
+    }),
   };
 }

@@ -1,5 +1,5 @@
 import { makeStyles } from '@fluentui/react-components';
-import { Link, Outlet, ScrollRestoration, useParams } from 'react-router-dom';
+import { Link, Outlet, useParams } from 'react-router-dom';
 import { Brand } from '../../shared/ui/brand';
 import { mainId } from '../../shared/ui/main-region';
 import { onBar, ownTokens } from '../../shared/ui/own-tokens';
@@ -63,7 +63,6 @@ export function AppFrame() {
         <AccountMenu />
       </header>
       <Outlet />
-      <ScrollRestoration />
     </>
   );
 }

@@ -1,15 +1,10 @@
-import {
-  MessageBar,
-  MessageBarBody,
-  makeStyles,
-  Skeleton,
-  SkeletonItem,
-  tokens,
-} from '@fluentui/react-components';
+import { makeStyles, tokens } from '@fluentui/react-components';
 import type { ReactNode } from 'react';
 import { Brand } from '../../shared/ui/brand';
 import { MainRegion } from '../../shared/ui/main-region';
+import { Notice } from '../../shared/ui/notice';
 import { onBar, ownTokens } from '../../shared/ui/own-tokens';
+import { Skeleton, SkeletonItem } from '../../shared/ui/skeleton';
 
 const useStyles = makeStyles({
   bar: {
@@ -63,11 +58,7 @@ export function DoorFrame(props: { heading: string; notice?: string | undefined;
               Weigh candidate trial designs for one research question side by side.
             </p>
           </div>
-          {props.notice && (
-            <MessageBar intent="info" layout="multiline">
-              <MessageBarBody>{props.notice}</MessageBarBody>
-            </MessageBar>
-          )}
+          {props.notice && <Notice intent="info">{props.notice}</Notice>}
           {props.children}
         </div>
       </MainRegion>

@@ -2,6 +2,7 @@ import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
 import { Link } from 'react-router-dom';
 import { OptionTag } from '../../shared/ui/option-tag';
 import { ownTokens } from '../../shared/ui/own-tokens';
+import { PageLink } from './page-link';
 import { type StudyPage, useStudyPages } from './study-pages';
 
 const useStyles = makeStyles({
@@ -9,7 +10,7 @@ const useStyles = makeStyles({
     position: 'sticky',
     top: '48px',
     alignSelf: 'start',
-    padding: '18px 10px',
+    padding: '16px 8px',
     '@media (max-width: 900px)': { display: 'none' },
     '@media print': { display: 'none' },
   },
@@ -55,14 +56,14 @@ export function SideList({ studyId }: { studyId: string }) {
             </p>
           )}
           <ul aria-labelledby="workings">
-            {pages.workings.map(({ id, letter, position, name, path, current }) => (
+            {pages.workings.map(({ id, letter, position, name, ruledOut, path, current }) => (
               <li key={id}>
                 <Link
                   to={path}
                   aria-current={current ? 'page' : undefined}
                   className={mergeClasses(styles.item, current && styles.here)}
                 >
-                  <OptionTag letter={letter} position={position} small />
+                  <OptionTag letter={letter} position={position} small outlined={ruledOut} />
                   <span>{name}</span>
                 </Link>
               </li>
@@ -79,14 +80,11 @@ export function SideList({ studyId }: { studyId: string }) {
 
 function Pages({ pages }: { pages: readonly StudyPage[] }) {
   const styles = useStyles();
-  return pages.map(({ label, path, current }) => (
-    <Link
-      key={path}
-      to={path}
-      aria-current={current ? 'page' : undefined}
-      className={mergeClasses(styles.item, current && styles.here)}
-    >
-      {label}
-    </Link>
+  return pages.map((page) => (
+    <PageLink
+      key={page.path}
+      page={page}
+      className={mergeClasses(styles.item, page.current && styles.here)}
+    />
   ));
 }

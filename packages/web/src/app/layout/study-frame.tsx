@@ -10,10 +10,11 @@ import { SideList } from './side-list';
 const useStyles = makeStyles({
   frame: {
     display: 'grid',
-    gridTemplateColumns: '188px minmax(0, 1fr)',
+    gridTemplateColumns: '172px minmax(0, 1fr)',
     minHeight: 'calc(100vh - 48px)',
     '@media (max-width: 900px)': { display: 'block' },
-    '@media print': { display: 'block' },
+    '@media (min-width: 1760px)': { gridTemplateColumns: '216px minmax(0, 1fr)' },
+    '@media print': { display: 'block', minHeight: 0 },
   },
   page: {
     borderLeft: `1px solid ${tokens.colorNeutralStroke2}`,

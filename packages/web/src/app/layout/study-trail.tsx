@@ -5,6 +5,7 @@ import { OptionTag } from '../../shared/ui/option-tag';
 import { onBar } from '../../shared/ui/own-tokens';
 import { usePanelStyles } from '../../shared/ui/panel-item';
 import { paths } from '../paths';
+import { PageLink } from './page-link';
 import { type StudyPage, type StudyPages, useStudyPages } from './study-pages';
 
 const useStyles = makeStyles({
@@ -103,7 +104,7 @@ function PagesMenu({ pages, here }: Place) {
           </div>
           <div className={panel.group}>
             <p className={panel.heading}>Working</p>
-            {pages.workings.map(({ id, letter, position, name, path, current }) => (
+            {pages.workings.map(({ id, letter, position, name, ruledOut, path, current }) => (
               <Link
                 key={id}
                 to={path}
@@ -111,7 +112,7 @@ function PagesMenu({ pages, here }: Place) {
                 className={mergeClasses(panel.item, current && panel.here)}
                 onClick={close}
               >
-                <OptionTag letter={letter} position={position} small />
+                <OptionTag letter={letter} position={position} small outlined={ruledOut} />
                 <span>{name}</span>
               </Link>
             ))}
@@ -127,15 +128,12 @@ function PagesMenu({ pages, here }: Place) {
 
 function MenuItems({ pages, onGo }: { pages: readonly StudyPage[]; onGo: () => void }) {
   const panel = usePanelStyles();
-  return pages.map(({ label, path, current }) => (
-    <Link
-      key={path}
-      to={path}
-      aria-current={current ? 'page' : undefined}
-      className={mergeClasses(panel.item, current && panel.here)}
-      onClick={onGo}
-    >
-      {label}
-    </Link>
+  return pages.map((page) => (
+    <PageLink
+      key={page.path}
+      page={page}
+      className={mergeClasses(panel.item, page.current && panel.here)}
+      onGo={onGo}
+    />
   ));
 }

@@ -17,16 +17,16 @@ export function AdminPage() {
   return (
     <MainRegion>
       <title>People · Steelyard</title>
-      {person?.administrator ? <Administration personId={person.id} /> : <NotAnAdministrator />}
+      {person?.administrator ? <Administration /> : <NotAnAdministrator />}
     </MainRegion>
   );
 }
 
-function Administration({ personId }: { personId: string }) {
+function Administration() {
   return (
     <PageBody heading="People" sub="Who has an account here. A study’s content is open to its members alone.">
       <QueryBoundary what="list of people" skeleton={<PeopleSkeleton />}>
-        <People personId={personId} />
+        <People />
       </QueryBoundary>
       <TitledSection title="What was done to people and their accounts" level={2}>
         <QueryBoundary what="record" skeleton={<HistorySkeleton />}>

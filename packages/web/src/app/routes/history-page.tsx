@@ -20,6 +20,7 @@ export function HistoryPage() {
         <History
           query={studyHistoryQuery(studyId)}
           label="Changes"
+          treatments={study?.treatments.map(({ name }) => name)}
           empty="Nothing has been changed in this study yet."
         />
       </QueryBoundary>

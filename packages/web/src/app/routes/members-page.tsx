@@ -1,5 +1,5 @@
 import { useQuery, useQueryClient } from '@tanstack/react-query';
-import { useNavigate, useParams } from 'react-router-dom';
+import { useParams } from 'react-router-dom';
 import { sessionQuery } from '../../features/access/api/access';
 import { Members } from '../../features/members/components/members';
 import { MembersSkeleton } from '../../features/members/components/members-skeleton';
@@ -7,19 +7,20 @@ import { studiesQuery, studyQuery } from '../../features/studies/api/studies';
 import { PageBody } from '../../shared/ui/page-body';
 import { QueryBoundary } from '../../shared/ui/query-boundary';
 import { paths } from '../paths';
+import { useDeparture } from '../use-departure';
 
 export function MembersPage() {
   const { studyId = '' } = useParams();
   const queryClient = useQueryClient();
-  const navigate = useNavigate();
+  const depart = useDeparture();
   const { data: person } = useQuery(sessionQuery());
   const { data: study } = useQuery(studyQuery(studyId));
 
-  const leave = async () => {
-    await navigate(paths.studies);
-    queryClient.removeQueries({ queryKey: studyQuery(studyId).queryKey });
-    await queryClient.invalidateQueries({ queryKey: studiesQuery().queryKey });
-  };
+  const leave = () =>
+    depart(paths.studies, () => {
+      queryClient.removeQueries({ queryKey: studyQuery(studyId).queryKey });
+      void queryClient.invalidateQueries({ queryKey: studiesQuery().queryKey });
+    });
   return (
     <PageBody heading="Members" sub="Who is in this study, and what each of them may do.">
       <title>{`Members · ${study ? `${study.name} · ` : ''}Steelyard`}</title>
@@ -28,7 +29,7 @@ export function MembersPage() {
           studyId={studyId}
           personId={person?.id ?? ''}
           mayChange={study?.role === 'methodologist'}
-          onLeft={() => void leave()}
+          onLeft={leave}
         />
       </QueryBoundary>
     </PageBody>

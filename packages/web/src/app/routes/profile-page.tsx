@@ -1,6 +1,5 @@
 import { makeStyles } from '@fluentui/react-components';
 import { useQueryClient, useSuspenseQuery } from '@tanstack/react-query';
-import { useNavigate } from 'react-router-dom';
 import { accessQuery } from '../../features/access/api/access';
 import { profileQuery } from '../../features/profile/api/profile';
 import { NameForm } from '../../features/profile/components/name-form';
@@ -12,6 +11,7 @@ import { QueryBoundary } from '../../shared/ui/query-boundary';
 import { TitledSection } from '../../shared/ui/titled-section';
 import { DoorSkeleton } from '../layout/door-frame';
 import { paths } from '../paths';
+import { useDeparture } from '../use-departure';
 
 const useStyles = makeStyles({ sections: { display: 'grid', gap: '28px', maxWidth: '440px' } });
 
@@ -29,13 +29,12 @@ export function ProfilePage() {
 function Profile() {
   const styles = useStyles();
   const queryClient = useQueryClient();
-  const navigate = useNavigate();
+  const depart = useDeparture();
   const { data: profile } = useSuspenseQuery(profileQuery());
-  // Once this page is gone nothing asks again for what is forgotten.
-  const leave = async () => {
-    await navigate(paths.signIn);
-    queryClient.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== accessQuery().queryKey[0] });
-  };
+  const leave = () =>
+    depart(paths.signIn, () =>
+      queryClient.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== accessQuery().queryKey[0] }),
+    );
   return (
     <PageBody heading="Profile" sub={`You sign in as ${profile.email}.`}>
       <div className={styles.sections}>
@@ -46,7 +45,7 @@ function Profile() {
           <PasswordForm email={profile.email} />
         </TitledSection>
         <TitledSection title="Your sessions" level={2}>
-          <SignOutEverywhere onSignedOut={() => void leave()} />
+          <SignOutEverywhere onSignedOut={leave} />
         </TitledSection>
       </div>
     </PageBody>

@@ -1,7 +1,8 @@
-import { useParams } from 'react-router-dom';
+import { useParams, useSearchParams } from 'react-router-dom';
 import { useWeighing } from '../../features/weigh/api/use-weighing';
 import { WeighSkeleton } from '../../features/weigh/components/weigh-skeleton';
 import { Working } from '../../features/working/components/working';
+import { WorkingVersion } from '../../features/working/components/working-version';
 import { PageBody } from '../../shared/ui/page-body';
 import { QueryBoundary } from '../../shared/ui/query-boundary';
 import { TextLink } from '../../shared/ui/text-link';
@@ -17,7 +18,9 @@ export function WorkingPage() {
 }
 
 function WorkingOf({ studyId, optionId }: { studyId: string; optionId: string }) {
-  const weighing = useWeighing(studyId);
+  const [search] = useSearchParams();
+  const version = search.get('version') === 'stored' ? 'stored' : 'edited';
+  const weighing = useWeighing(studyId, version);
   const option = weighing.options.find(({ id }) => id === optionId);
   const { name } = weighing.study;
   if (!option) {
@@ -38,6 +41,13 @@ function WorkingOf({ studyId, optionId }: { studyId: string; optionId: string })
         option={option}
         weighing={weighing}
         weighHref={paths.weigh(studyId, optionId)}
+        version={
+          <WorkingVersion
+            edited={option.draft !== undefined || weighing.sizing !== undefined}
+            storedHref={paths.working(studyId, optionId, 'stored')}
+            editedHref={version === 'stored' ? paths.working(studyId, optionId) : undefined}
+          />
+        }
       />
     </>
   );

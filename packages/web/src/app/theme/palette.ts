@@ -1,23 +1,4 @@
-/** The product's colours, one set for light and one for dark surroundings. */
-export interface Palette {
-  ground: string;
-  card: string;
-  line: string;
-  edge: string;
-  text: string;
-  muted: string;
-  bar: string;
-  brass: string;
-  brassSoft: string;
-  fits: string;
-  over: string;
-  options: [string, string, string, string, string, string];
-  /** Text on brass and on an option's hue. */
-  onHue: string;
-  /** A row under the pointer, and the chosen one. */
-  hovered: string;
-  chosen: string;
-}
+import type { Palette } from '../../shared/ui/palette';
 
 export const lightPalette: Palette = {
   ground: '#f7f6f2',

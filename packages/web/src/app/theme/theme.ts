@@ -5,7 +5,8 @@ import {
   type Theme,
 } from '@fluentui/react-components';
 import type { OwnTheme } from '../../shared/ui/own-tokens';
-import { darkPalette, lightPalette, type Palette } from './palette';
+import type { Palette } from '../../shared/ui/palette';
+import { darkPalette, lightPalette } from './palette.ts';
 
 const brass: BrandVariants = {
   10: '#0a0601',

@@ -1,5 +1,6 @@
-import { makeStyles, PortalMountNodeProvider, tokens } from '@fluentui/react-components';
+import { makeStyles, tokens } from '@fluentui/react-components';
 import { type ReactNode, useEffect, useId, useState } from 'react';
+import { MountContext } from './mount';
 
 const useStyles = makeStyles({
   box: {
@@ -34,12 +35,12 @@ export function DialogBox({ title, onClose, children }: DialogBoxProps) {
   return (
     <dialog ref={setDialog} aria-labelledby={titleId} className={styles.box} onClose={onClose}>
       {dialog && (
-        <PortalMountNodeProvider value={dialog}>
+        <MountContext value={dialog}>
           <h2 id={titleId} className={styles.title}>
             {title}
           </h2>
           {children(() => dialog.close())}
-        </PortalMountNodeProvider>
+        </MountContext>
       )}
     </dialog>
   );

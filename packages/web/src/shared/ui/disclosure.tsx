@@ -2,8 +2,11 @@ import { Button, makeStyles, mergeClasses, tokens } from '@fluentui/react-compon
 import { type ReactNode, useEffect, useId, useRef, useState } from 'react';
 import { onBar } from './own-tokens';
 
+// Where the bar is as narrow as a phone, a panel hangs from the bar's edge rather than from its button.
+const narrow = '@media (max-width: 640px)';
+
 const useStyles = makeStyles({
-  root: { position: 'relative', minWidth: 0 },
+  root: { position: 'relative', minWidth: 0, [narrow]: { position: 'static' } },
   trigger: {
     minWidth: 0,
     maxWidth: '100%',
@@ -31,8 +34,8 @@ const useStyles = makeStyles({
     boxShadow: tokens.shadow16,
     overflowWrap: 'anywhere',
   },
-  start: { left: 0 },
-  end: { right: 0 },
+  start: { left: 0, [narrow]: { left: '12px' } },
+  end: { right: 0, [narrow]: { right: '12px' } },
 });
 
 interface DisclosureProps {

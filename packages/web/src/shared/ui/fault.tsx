@@ -1,12 +1,7 @@
-import {
-  Button,
-  MessageBar,
-  MessageBarActions,
-  MessageBarBody,
-  makeStyles,
-} from '@fluentui/react-components';
+import { Button, makeStyles } from '@fluentui/react-components';
 import { ApiError } from '../api/client';
 import { messageOf } from '../api/faults';
+import { Notice } from './notice';
 
 const useStyles = makeStyles({
   bar: { margin: '16px' },
@@ -29,18 +24,15 @@ export function Fault({ error, what, wholePage, onRetry }: FaultProps) {
   const heading = absent ? `There is no ${what} here` : `The ${what} could not be shown`;
   const Heading = wholePage ? 'h1' : 'strong';
   return (
-    <MessageBar intent="error" layout="multiline" className={styles.bar}>
+    <Notice
+      intent="error"
+      className={styles.bar}
+      actions={!absent && <Button onClick={onRetry}>Try again</Button>}
+    >
       {wholePage && <title>{`${heading} · Steelyard`}</title>}
-      <MessageBarBody>
-        <Heading className={styles.heading}>{heading}.</Heading> {explanation(error, absent)}
-        {reference && ` Reference for support: ${reference}.`}
-      </MessageBarBody>
-      {!absent && (
-        <MessageBarActions>
-          <Button onClick={onRetry}>Try again</Button>
-        </MessageBarActions>
-      )}
-    </MessageBar>
+      <Heading className={styles.heading}>{heading}.</Heading> {explanation(error, absent)}
+      {reference && ` Reference for support: ${reference}.`}
+    </Notice>
   );
 }
 

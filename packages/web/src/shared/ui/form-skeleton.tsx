@@ -1,4 +1,5 @@
-import { makeStyles, Skeleton, SkeletonItem } from '@fluentui/react-components';
+import { makeStyles } from '@fluentui/react-components';
+import { Skeleton, SkeletonItem } from './skeleton';
 
 const useStyles = makeStyles({ skeleton: { display: 'grid', gap: '16px', maxWidth: '640px' } });
 

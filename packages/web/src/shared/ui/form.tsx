@@ -1,13 +1,7 @@
-import {
-  Field,
-  Input,
-  type InputProps,
-  MessageBar,
-  MessageBarBody,
-  makeStyles,
-} from '@fluentui/react-components';
+import { Field, Input, type InputProps, makeStyles } from '@fluentui/react-components';
 import type { ReactNode } from 'react';
 import { type Control, type FieldPath, type FieldValues, useController } from 'react-hook-form';
+import { Notice } from './notice';
 
 const useStyles = makeStyles({
   form: { display: 'grid', gridTemplateColumns: 'minmax(0, 1fr)', gap: '14px' },
@@ -32,9 +26,9 @@ export function Form(props: {
       }}
     >
       {props.fault && (
-        <MessageBar intent="error" layout="multiline" role="alert">
-          <MessageBarBody>{props.fault}</MessageBarBody>
-        </MessageBar>
+        <Notice intent="error" role="alert">
+          {props.fault}
+        </Notice>
       )}
       {props.children}
     </form>

@@ -1,5 +1,6 @@
-import { makeStyles, mergeClasses, Tooltip, type TooltipProps, tokens } from '@fluentui/react-components';
-import { type ReactNode, useState } from 'react';
+import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
+import type { ReactNode } from 'react';
+import { Tip } from './tip';
 
 const useStyles = makeStyles({
   trigger: {
@@ -20,7 +21,7 @@ const useStyles = makeStyles({
 interface HintProps {
   says: string;
   /** Whether what it says names the trigger or adds to its text. */
-  relationship?: TooltipProps['relationship'];
+  relationship?: 'label' | 'description';
   className?: string;
   children: ReactNode;
 }
@@ -28,22 +29,11 @@ interface HintProps {
 /** Something that says more when it is pointed at, focused or pressed. */
 export function Hint({ says, relationship = 'description', className, children }: HintProps) {
   const styles = useStyles();
-  const [visible, setVisible] = useState(false);
   return (
-    <Tooltip
-      content={says}
-      relationship={relationship}
-      withArrow
-      visible={visible}
-      onVisibleChange={(_, data) => setVisible(data.visible)}
-    >
-      <button
-        type="button"
-        className={mergeClasses(styles.trigger, className)}
-        onClick={() => setVisible(true)}
-      >
+    <Tip says={says} relationship={relationship} pressed>
+      <button type="button" className={mergeClasses(styles.trigger, className)}>
         {children}
       </button>
-    </Tooltip>
+    </Tip>
   );
 }

@@ -6,6 +6,7 @@ const useStyles = makeStyles({
     maxWidth: '1040px',
     marginInline: 'auto',
     padding: '24px 20px 48px',
+    '@media (min-width: 1760px)': { maxWidth: '1280px' },
     '@media (max-width: 640px)': { padding: '16px 12px 32px' },
   },
   heading: { fontSize: '22px', lineHeight: '30px', fontWeight: 700, overflowWrap: 'anywhere' },

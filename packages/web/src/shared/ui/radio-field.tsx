@@ -20,8 +20,8 @@ export function RadioField<Values extends FieldValues>(props: RadioFieldProps<Va
       label={label}
       hint={hint}
       validationState={error ? 'error' : 'none'}
-      // A choice is only ever wrong by not having been made.
-      validationMessage={error && 'Choose one.'}
+      // Wrong by not having been made, or by what it requires of something else.
+      validationMessage={error && (error.type === 'custom' || !error.type ? error.message : 'Choose one.')}
     >
       <RadioGroup
         name={field.name}

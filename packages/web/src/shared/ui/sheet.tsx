@@ -1,6 +1,7 @@
-import { Button, makeStyles, PortalMountNodeProvider, tokens } from '@fluentui/react-components';
+import { Button, makeStyles, tokens } from '@fluentui/react-components';
 import { DismissRegular } from '@fluentui/react-icons';
 import { type ReactNode, useEffect, useId, useState } from 'react';
+import { MountContext } from './mount';
 
 const useStyles = makeStyles({
   sheet: {
@@ -50,7 +51,7 @@ export function Sheet(props: { title: ReactNode; onClose: () => void; children: 
     <dialog ref={setDialog} aria-labelledby={title} className={styles.sheet} onClose={props.onClose}>
       {dialog && (
         // What pops up from within must stand in the dialog too: the page below it is out of reach.
-        <PortalMountNodeProvider value={dialog}>
+        <MountContext value={dialog}>
           <div className={styles.head}>
             <h2 id={title} className={styles.title}>
               {props.title}
@@ -64,7 +65,7 @@ export function Sheet(props: { title: ReactNode; onClose: () => void; children: 
             />
           </div>
           <div className={styles.body}>{props.children}</div>
-        </PortalMountNodeProvider>
+        </MountContext>
       )}
     </dialog>
   );

@@ -11,10 +11,11 @@ const meanings = {
     'The most clusters, participants per cluster, money or months that exist; the first broken is binding.',
   ruling: 'Whether an option may be chosen at all, and why: admissible, with conditions, or not.',
   choice: 'The option settled on, why, and why not each other.',
-  beam: 'One option’s cost as a bar, split by arm: control outlined, active filled, all on one scale.',
-  verdict: 'What the comparison comes to at the hold, worked out afresh from the figures below.',
+  beam: 'What one option takes, as a bar split by arm or phase, on the same scale as the others.',
+  tradeOff: 'Every option as a curve over its size: what each size takes, and what it gives.',
   ledger: 'The list of what this study assumes: each value with its range and where it comes from.',
   planningValue: 'One assumption: a value with its range, its source, who set it and when.',
+  lever: 'A change that cuts participants, and what it costs in money, months, visits and validity.',
   override: 'This option takes a value of its own in place of the ledger’s, for the reason given.',
 } as const;
 

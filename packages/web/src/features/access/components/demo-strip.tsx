@@ -1,7 +1,8 @@
-import { MessageBar, MessageBarBody, makeStyles, tokens } from '@fluentui/react-components';
+import { makeStyles, tokens } from '@fluentui/react-components';
 import type { AccessView, PersonView } from '@steelyard/api/contract/access';
 import { useMutation } from '@tanstack/react-query';
 import { messageOf } from '../../../shared/api/faults';
+import { Notice } from '../../../shared/ui/notice';
 import { ownTokens } from '../../../shared/ui/own-tokens';
 import { signIn } from '../api/access';
 
@@ -63,9 +64,9 @@ export function DemoStrip({ accounts, password, onSignedIn }: DemoStripProps) {
         All people, organisations, studies and figures here are fictional. Password of each: {password}
       </p>
       {enter.isError && (
-        <MessageBar intent="error" layout="multiline" role="alert" className={styles.fault}>
-          <MessageBarBody>{messageOf(enter.error)}</MessageBarBody>
-        </MessageBar>
+        <Notice intent="error" role="alert" className={styles.fault}>
+          {messageOf(enter.error)}
+        </Notice>
       )}
       <ul className={styles.accounts}>
         {accounts.map(({ name, email, part }) => (

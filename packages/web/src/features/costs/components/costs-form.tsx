@@ -1,4 +1,4 @@
-import { Button, makeStyles, tokens } from '@fluentui/react-components';
+import { makeStyles, tokens } from '@fluentui/react-components';
 import { newCostPlanSchema } from '@steelyard/api/contract/costs';
 import { useQueryClient } from '@tanstack/react-query';
 import { type ReactNode, useDeferredValue, useMemo, useState } from 'react';
@@ -6,12 +6,12 @@ import type { Control, FieldPath } from 'react-hook-form';
 import { Form, TextField } from '../../../shared/ui/form';
 import { NumberField } from '../../../shared/ui/number-field';
 import { TitledSection } from '../../../shared/ui/titled-section';
-import { useKeptForm } from '../../studies/api/use-kept-form';
-import { BothVersionsByHistory } from '../../studies/components/both-versions';
-import { EffectsTable } from '../../studies/components/effects-table';
+import { SaveEnd } from '../../studies/components/save-end';
 import { toReplace } from '../../studies/model/assumed';
-import { differencesOf } from '../../studies/model/differences';
 import { type Effect, effectsOf, type Stored } from '../../studies/model/effects';
+import { useKeptForm } from '../../unsaved/api/use-kept-form';
+import { BothVersionsByHistory } from '../../unsaved/components/both-versions';
+import { differencesOf } from '../../unsaved/model/differences';
 import { keepCosts, putCosts } from '../api/costs';
 import { type CostValues, costBodyOf, costValuesOf, typedCosts } from '../model/cost-form';
 import {
@@ -36,7 +36,6 @@ const useStyles = makeStyles({
   told: { marginBottom: '8px', color: tokens.colorNeutralForeground2 },
   group: { margin: '0 0 8px', padding: 0, border: 'none', minWidth: 0 },
   legend: { padding: 0, fontWeight: 700 },
-  actions: { display: 'flex', flexWrap: 'wrap', gap: '8px' },
 });
 
 /** Money and months as the methodologist and the investigator state them. */
@@ -46,7 +45,7 @@ export function CostsForm({ stored }: { stored: Stored }) {
   const { study, costs } = stored;
   const treatments = study.treatments.length;
   const [saved, setSaved] = useState<Effect[]>();
-  const { form, values, changed, fault, theirs, submit, discard, takeTheirs, keepMine } = useKeptForm({
+  const kept = useKeptForm({
     what: `${study.id}/costs`,
     view: costs,
     valuesOf: (view) => costValuesOf(view ?? costs, treatments),
@@ -56,6 +55,7 @@ export function CostsForm({ stored }: { stored: Stored }) {
     onStored: (view) => view && keepCosts(queryClient, study.id, view),
     onSaved: (view) => setSaved(effectsOf(stored, { costs: view })),
   });
+  const { form, values, fault, theirs, submit, takeTheirs, keepMine } = kept;
   const typed = useDeferredValue(JSON.stringify(typedCosts(values) ?? null));
   const effects = useMemo(() => {
     const plan = JSON.parse(typed);
@@ -65,7 +65,7 @@ export function CostsForm({ stored }: { stored: Stored }) {
   const { currency } = values.costs;
 
   return (
-    <Form label="Costs and accrual" onSubmit={submit} fault={fault}>
+    <Form label="Costs and accrual" onSubmit={() => void submit()} fault={fault}>
       {theirs?.view && (
         <BothVersionsByHistory
           studyId={study.id}
@@ -138,31 +138,13 @@ export function CostsForm({ stored }: { stored: Stored }) {
           autoComplete="off"
         />
       </TitledSection>
-      {changed && effects && (
-        <EffectsTable
-          label="Options before and after the costs change"
-          effects={effects}
-          currency={currency}
-        />
-      )}
-      {!changed && saved && (
-        <EffectsTable
-          label="Options before and after the change"
-          effects={saved}
-          currency={costs.costs.currency}
-          saved
-        />
-      )}
-      <div className={styles.actions}>
-        <Button
-          type="submit"
-          appearance="primary"
-          disabledFocusable={!changed || form.formState.isSubmitting}
-        >
-          Save costs and accrual
-        </Button>
-        {changed && <Button onClick={discard}>Discard my changes</Button>}
-      </div>
+      <SaveEnd
+        verb="Save costs and accrual"
+        currency={currency}
+        kept={kept}
+        effects={effects}
+        saved={saved}
+      />
     </Form>
   );
 }

@@ -1,12 +1,12 @@
 import { Checkbox, makeStyles } from '@fluentui/react-components';
-import { type Control, useController } from 'react-hook-form';
+import { useController } from 'react-hook-form';
 import { NumberField } from '../../../shared/ui/number-field';
-import type { OptionDraft } from '../families/family-ui';
+import type { PartProps } from './structure-props';
 
 const useStyles = makeStyles({ fields: { display: 'grid', gap: '8px' } });
 
 /** Whether a continuous outcome is measured once or more often, and how often. */
-export function MeasurementFields({ control }: { control: Control<OptionDraft> }) {
+export function MeasurementFields({ form: { control } }: PartProps<'measurements'>) {
   const styles = useStyles();
   const { field } = useController({ control, name: 'plan.repeated' });
   return (
@@ -14,7 +14,7 @@ export function MeasurementFields({ control }: { control: Control<OptionDraft> }
       <Checkbox
         label="Measured more than once: baselines before, follow-ups after"
         checked={Boolean(field.value)}
-        onChange={(_, { checked }) => field.onChange(checked ? { baselines: 1, followUps: 1 } : undefined)}
+        onChange={(_, { checked }) => field.onChange(checked ? { baselines: 1, followUps: 1 } : null)}
       />
       {field.value && (
         <>

@@ -1,5 +1,6 @@
 import { create } from 'zustand';
 import { persist } from 'zustand/middleware';
+import { shareAcrossTabs } from '../../../shared/across-tabs';
 import type { OptionDraft } from '../families/family-ui';
 
 /** One person's edits of one option that are not stored yet, and what was stored when they began. */
@@ -7,16 +8,31 @@ export interface KeptDraft extends OptionDraft {
   base: OptionDraft;
 }
 
+/** The size of an option as its plan states it. */
+export interface PlanSize {
+  units?: number | undefined;
+  clusterSize?: number | undefined;
+}
+
+/** Sizes that one person is trying out in one study; while it lasts, the hold is Sizes. */
+export interface Sizing {
+  /** The sizes stated before, by option: what undoing goes back to. */
+  before: Record<string, PlanSize>;
+}
+
 interface Drafts {
   drafts: Record<string, KeptDraft>;
+  sizings: Record<string, Sizing>;
 }
 
 /** Unsaved edits on this device, by person and option: a reload and a lost session leave them alone. */
 export const useDrafts = create<Drafts>()(
-  persist((): Drafts => ({ drafts: {} }), { name: 'steelyard-option-drafts' }),
+  persist((): Drafts => ({ drafts: {}, sizings: {} }), { name: 'steelyard-option-drafts' }),
 );
+shareAcrossTabs(useDrafts);
 
-export const draftKey = (personId: string, optionId: string): string => `${personId}/${optionId}`;
+/** Of a person's draft of an option, and of the sizes they try out in a study. */
+export const draftKey = (personId: string, id: string): string => `${personId}/${id}`;
 
 export function keepDraft(key: string, draft: KeptDraft): void {
   useDrafts.setState(({ drafts }) => ({ drafts: { ...drafts, [key]: draft } }));

@@ -34,10 +34,15 @@ const deed = ({ action, what }: AuditEntryView) => `${phrases[action] ?? action}
 /** More facts than these wait until they are asked for. */
 const atOnce = 6;
 
+interface HistoryEntryProps {
+  entry: AuditEntryView;
+  treatments: readonly string[];
+}
+
 /** One thing somebody did, with every fact it changed. */
-export function HistoryEntry({ entry }: { entry: AuditEntryView }) {
+export function HistoryEntry({ entry, treatments }: HistoryEntryProps) {
   const styles = useStyles();
-  const facts = changedFacts(entry);
+  const facts = changedFacts(entry, treatments);
   const table = <Facts of={entry} facts={facts} />;
   return (
     <li className={styles.entry}>
@@ -78,7 +83,7 @@ function Facts({ of, facts }: { of: AuditEntryView; facts: readonly ChangedFact[
           fact.name,
           ...sides.map(({ side }) => (
             <span key={side} className={styles.text}>
-              {fact[side] ?? 'none'}
+              {fact[side]}
             </span>
           )),
         ],

@@ -1,6 +1,7 @@
-import { Button, MessageBar, MessageBarBody, makeStyles, tokens } from '@fluentui/react-components';
+import { Button, makeStyles, tokens } from '@fluentui/react-components';
 import { useSuspenseInfiniteQuery } from '@tanstack/react-query';
 import { messageOf } from '../../../shared/api/faults';
+import { Notice } from '../../../shared/ui/notice';
 import type { HistoryQuery } from '../api/history';
 import { HistoryEntry } from './history-entry';
 
@@ -15,10 +16,12 @@ interface HistoryProps {
   label: string;
   /** What to say while nothing has happened. */
   empty: string;
+  /** What the study’s treatments are called, by place. */
+  treatments?: readonly string[];
 }
 
 /** Who did what and when, newest first, page by page. */
-export function History({ query, label, empty }: HistoryProps) {
+export function History({ query, label, empty, treatments = [] }: HistoryProps) {
   const styles = useStyles();
   const { data, hasNextPage, fetchNextPage, isFetchingNextPage, isFetchNextPageError, error } =
     useSuspenseInfiniteQuery(query);
@@ -28,13 +31,13 @@ export function History({ query, label, empty }: HistoryProps) {
     <>
       <ol aria-label={label} className={styles.entries}>
         {entries.map((entry) => (
-          <HistoryEntry key={entry.id} entry={entry} />
+          <HistoryEntry key={entry.id} entry={entry} treatments={treatments} />
         ))}
       </ol>
       {isFetchNextPageError && (
-        <MessageBar intent="error" layout="multiline" role="alert" className={styles.fault}>
-          <MessageBarBody>What came before could not be shown. {messageOf(error)}</MessageBarBody>
-        </MessageBar>
+        <Notice intent="error" role="alert" className={styles.fault}>
+          What came before could not be shown. {messageOf(error)}
+        </Notice>
       )}
       {hasNextPage ? (
         <Button disabledFocusable={isFetchingNextPage} onClick={() => void fetchNextPage()}>

@@ -1,11 +1,19 @@
 import { capitalised } from '../../../shared/format/lists';
 
-/** “Costs: per exposure 2” for `costs.perExposure.1`. */
-export function factName(path: string): string {
+/** A treatment by its name; by its number where the study no longer has it. */
+export const treatmentAt = (place: number, treatments: readonly string[]): string =>
+  treatments[place] ?? `treatment ${place + 1}`;
+
+/** “Costs: per exposure, Gel” for `costs.perExposure.1`, in a study whose second treatment is “Gel”. */
+export function factName(path: string, treatments: readonly string[]): string {
   const reasoned = /^whyNot\.(?<option>.*)$/.exec(path)?.groups?.option;
   if (reasoned) return `Why not “${reasoned}”`;
   const arm = /(^|\.)treatments\.(?<index>\d+)$/.exec(path)?.groups?.index;
   if (arm) return `Arm ${Number(arm) + 1}`;
+  const priced = /^costs\.(?<key>\w+)\.(?<place>\d+)$/.exec(path)?.groups;
+  if (priced) {
+    return `Costs: ${stepName(priced.key as string)}, ${treatmentAt(Number(priced.place), treatments)}`;
+  }
   const [first = '', ...rest] = path.split('.').filter((step) => step !== 'plan');
   const group = rest.length > 0 ? groups.get(first) : undefined;
   return capitalised(
@@ -30,6 +38,10 @@ const groups = new Map([
 /** Steps whose trade term is not their name spelt out. */
 const terms = new Map([
   ['email', 'e-mail'],
+  ['followUp', 'follow-up'],
+  ['followUps', 'follow-ups'],
+  ['startUp', 'start-up'],
+  ['closeOut', 'close-out'],
   ['icc', 'ICC'],
   ['sd', 'SD'],
   ['sdActive', 'SD, active arm'],

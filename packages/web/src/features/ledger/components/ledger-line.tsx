@@ -14,8 +14,8 @@ const useStyles = makeStyles({
   card: {
     display: 'grid',
     gridTemplateColumns: 'minmax(0, 1fr)',
-    gap: '8px',
-    padding: '12px 16px',
+    gap: '6px',
+    padding: '10px 16px 12px',
     border: `1px solid ${tokens.colorNeutralStroke2}`,
     borderRadius: '10px',
     backgroundColor: tokens.colorNeutralBackground1,
@@ -24,6 +24,14 @@ const useStyles = makeStyles({
   head: { display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: '4px 12px' },
   name: { flexGrow: 1, outlineStyle: 'none', fontSize: '15px', lineHeight: '22px', fontWeight: 700 },
   value: { fontSize: '17px', lineHeight: '24px', fontWeight: 700 },
+  foot: { display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: '8px 16px' },
+  facts: {
+    display: 'flex',
+    flexWrap: 'wrap',
+    flex: '1 1 min(280px, 100%)',
+    alignItems: 'center',
+    gap: '2px 20px',
+  },
   range: { display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: '4px 10px' },
   muted: { color: tokens.colorNeutralForeground2, fontSize: '13px', lineHeight: '18px' },
   actions: { display: 'flex', flexWrap: 'wrap', gap: '8px' },
@@ -63,22 +71,27 @@ export function LedgerLine({ study, line, form, actions, outcome }: LedgerLinePr
         <span className={styles.value}>{stored ? show(stored.value) : 'not stated'}</span>
         {!stored && actions}
       </div>
-      {stored && <Provenance stored={stored} show={show} />}
-      <p className={styles.muted}>{drawnOn(line)}</p>
+      {stored && <p>{stored.source}</p>}
+      <div className={styles.foot}>
+        <div className={styles.facts}>
+          {stored && <Provenance stored={stored} show={show} />}
+          <p className={styles.muted}>{drawnOn(line)}</p>
+        </div>
+        {stored && (
+          <div className={styles.actions}>
+            {actions}
+            <Button
+              aria-label={`History of ${line.label}`}
+              aria-expanded={historyOpen}
+              onClick={() => setHistoryOpen(!historyOpen)}
+            >
+              History
+            </Button>
+          </div>
+        )}
+      </div>
       {outcome}
       {form}
-      {stored && (
-        <div className={styles.actions}>
-          {actions}
-          <Button
-            aria-label={`History of ${line.label}`}
-            aria-expanded={historyOpen}
-            onClick={() => setHistoryOpen(!historyOpen)}
-          >
-            History
-          </Button>
-        </div>
-      )}
       {stored && historyOpen && <ValueHistory studyId={study.id} line={{ ...line, stored }} show={show} />}
     </li>
   );
@@ -93,7 +106,6 @@ function Provenance({ stored, show }: { stored: PlanningValueView; show: (value:
         {low !== null && high !== null && <RangeFigure value={value} low={low} high={high} />}
         <span className={styles.muted}>{rangeOf(stored, show) ?? 'No range stated'}</span>
       </div>
-      <p>{stored.source}</p>
       <p className={styles.muted}>
         Set by {stored.setBy}, <Moment iso={stored.setAt} />
       </p>

@@ -1,22 +1,15 @@
-import {
-  Button,
-  Field,
-  makeStyles,
-  Select,
-  Skeleton,
-  SkeletonItem,
-  tokens,
-} from '@fluentui/react-components';
+import { Button, Field, makeStyles, Select, tokens } from '@fluentui/react-components';
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { counted } from '../../../shared/format/lists';
+import { capitalised, counted } from '../../../shared/format/lists';
+import { Skeleton, SkeletonItem } from '../../../shared/ui/skeleton';
 import { sessionQuery } from '../../access/api/access';
 import { mayDecide } from '../../designs/model/rights';
 import { useStored } from '../../studies/api/use-stored';
 import { EffectsTable } from '../../studies/components/effects-table';
 import { toReplace } from '../../studies/model/assumed';
 import type { Effect } from '../../studies/model/effects';
-import { editKey, useKeptEdits } from '../../studies/model/kept-edits';
+import { editKey, useKeptEdits } from '../../unsaved/model/kept-edits';
 import { apartFrom, type Line, linesOf } from '../model/lines';
 import { LedgerLine } from './ledger-line';
 import { LineForm } from './line-form';
@@ -86,7 +79,7 @@ export function Ledger({ studyId }: { studyId: string }) {
     <>
       <p className={styles.told}>
         {assumed > 0 &&
-          `${counted(assumed, 'value says', 'values say')} “${toReplace}”: put what you know in ${assumed === 1 ? 'its' : 'their'} place. `}
+          `${capitalised(counted(assumed, 'value says', 'values say'))} “${toReplace}”: put what you know in ${assumed === 1 ? 'its' : 'their'} place. `}
         {may
           ? 'A change moves every option that draws on the value; you see how before you save.'
           : 'The methodologist of the study sets these values.'}

@@ -4,12 +4,12 @@ import { useQueryClient } from '@tanstack/react-query';
 import { useDeferredValue, useEffect, useMemo } from 'react';
 import { Form, TextField } from '../../../shared/ui/form';
 import { NumberField } from '../../../shared/ui/number-field';
-import { useKeptForm } from '../../studies/api/use-kept-form';
-import { BothVersions } from '../../studies/components/both-versions';
 import { EffectsTable } from '../../studies/components/effects-table';
 import { toReplace } from '../../studies/model/assumed';
-import { differencesOf } from '../../studies/model/differences';
 import { type Effect, effectsOf, type Stored, withLine } from '../../studies/model/effects';
+import { useKeptForm } from '../../unsaved/api/use-kept-form';
+import { BothVersions } from '../../unsaved/components/both-versions';
+import { differencesOf } from '../../unsaved/model/differences';
 import { keepLine, putPlanningValue } from '../api/ledger';
 import { lineBodyOf, lineFields, lineValuesOf, typedLine } from '../model/line-form';
 import { figureOf, type Line } from '../model/lines';
@@ -37,7 +37,7 @@ export function LineForm({ studyId, line, stored, onClose, onSaved }: LineFormPr
   const styles = useStyles();
   const queryClient = useQueryClient();
   const { kind, unit } = figureOf(line.key, stored.study);
-  const { form, values, changed, fault, theirs, submit, discard, takeTheirs, keepMine } = useKeptForm({
+  const { form, values, changed, fault, busy, theirs, submit, discard, takeTheirs, keepMine } = useKeptForm({
     what: `${studyId}/planning-value/${line.id}`,
     view: line.stored,
     valuesOf: lineValuesOf,
@@ -65,7 +65,7 @@ export function LineForm({ studyId, line, stored, onClose, onSaved }: LineFormPr
   const field = { kind, control, ...(unit ? { unit } : {}) };
 
   return (
-    <Form label={`Set ${line.label}`} onSubmit={submit} fault={fault}>
+    <Form label={`Set ${line.label}`} onSubmit={() => void submit()} fault={fault}>
       {theirs && (
         <BothVersions
           differences={differencesOf(
@@ -103,11 +103,7 @@ export function LineForm({ studyId, line, stored, onClose, onSaved }: LineFormPr
         />
       )}
       <div className={styles.actions}>
-        <Button
-          type="submit"
-          appearance="primary"
-          disabledFocusable={!changed || form.formState.isSubmitting}
-        >
+        <Button type="submit" appearance="primary" disabledFocusable={!changed || busy}>
           Save
         </Button>
         <Button

@@ -1,9 +1,9 @@
-import { Skeleton, SkeletonItem } from '@fluentui/react-components';
 import type { PlanningValueView } from '@steelyard/api/contract/studies';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { DataTable } from '../../../shared/ui/data-table';
 import { Moment } from '../../../shared/ui/moment';
 import { QueryBoundary } from '../../../shared/ui/query-boundary';
+import { Skeleton, SkeletonItem } from '../../../shared/ui/skeleton';
 import { planningValueHistoryQuery } from '../api/ledger';
 import { type Line, rangeOf } from '../model/lines';
 

@@ -4,7 +4,6 @@ import {
   families,
   type LedgerEntry,
   type OptionPlan,
-  type OutcomeKind,
   type PlanningValueKey,
   planningValueKeys,
   planningValuesOf,
@@ -28,17 +27,8 @@ export interface Line {
   assumed: boolean;
 }
 
-const belongsTo: Partial<Record<PlanningValueKey, OutcomeKind>> = {
-  sd: 'continuous',
-  sdActive: 'continuous',
-  baselineCorrelation: 'continuous',
-  withinPersonCorrelation: 'continuous',
-  controlProportion: 'binary',
-};
-
 const takes = (family: FamilyId, key: PlanningValueKey, { plan }: StudyView): boolean =>
-  (belongsTo[key] ?? plan.outcome.kind) === plan.outcome.kind &&
-  planningValuesOf(family).some((place) => place.key === key);
+  planningValuesOf(family, plan.outcome.kind).some((place) => place.key === key);
 
 export const lineId = (key: PlanningValueKey, family: FamilyId | null) => `${key}/${family ?? 'every'}`;
 

@@ -1,51 +1,38 @@
 import { Button } from '@fluentui/react-components';
-import { zodResolver } from '@hookform/resolvers/zod';
 import { type NewMember, newMemberSchema } from '@steelyard/api/contract/members';
-import { useState } from 'react';
-import { useForm } from 'react-hook-form';
-import { placeFaults } from '../../../shared/api/faults';
+import { useMemo } from 'react';
 import { Form, TextField } from '../../../shared/ui/form';
 import { RadioField } from '../../../shared/ui/radio-field';
-import { dropValues, keptValues, useKeptValues } from '../../../shared/ui/use-kept-values';
+import { useKeptForm } from '../../unsaved/api/use-kept-form';
 import { type Member, useSetMember } from '../api/members';
 import { roleChoices } from '../model/roles';
 
 interface AddMemberProps {
   studyId: string;
-  personId: string;
   members: readonly Member[];
   onAdded: (said: string) => void;
 }
 
-const nobody: NewMember = { email: '', role: 'reader' };
+const nobody = (): NewMember => ({ email: '', role: 'reader' });
 
-export function AddMember({ studyId, personId, members, onAdded }: AddMemberProps) {
-  const [fault, setFault] = useState<string>();
+const newcomer = (members: readonly Member[]) =>
+  newMemberSchema.refine(({ email }) => members.every(({ person }) => person.email !== email), {
+    path: ['email'],
+    message: 'This person is a member already; change their role in the list above.',
+  });
+
+export function AddMember({ studyId, members, onAdded }: AddMemberProps) {
   const add = useSetMember(studyId);
-  const key = `steelyard-new-member/${personId}/${studyId}`;
-  const form = useForm<NewMember>({
-    resolver: zodResolver(newMemberSchema),
-    defaultValues: keptValues(key) ?? nobody,
+  const { form, fault, busy, submit } = useKeptForm({
+    what: `${studyId}/new-member`,
+    view: null,
+    valuesOf: nobody,
+    schema: useMemo(() => newcomer(members), [members]),
+    bodyOf: (values) => values,
+    send: (member: NewMember) => add.mutateAsync(member).then(() => member),
+    onSaved: ({ email, role }) => onAdded(`Added ${email} as ${role}.`),
   });
-  useKeptValues(form, key);
-  const { control, handleSubmit, setError, reset, formState } = form;
-
-  const submit = handleSubmit(async (values) => {
-    setFault(undefined);
-    if (members.some(({ person }) => person.email === values.email)) {
-      const message = 'This person is a member already; change their role in the list above.';
-      setError('email', { message }, { shouldFocus: true });
-      return;
-    }
-    await add.mutateAsync(values).then(
-      () => {
-        reset(nobody);
-        dropValues(key);
-        onAdded(`Added ${values.email} as ${values.role}.`);
-      },
-      (error) => setFault(placeFaults(error, ['email'], setError)),
-    );
-  });
+  const { control } = form;
 
   return (
     <Form label="Add a member" fault={fault} onSubmit={() => void submit()}>
@@ -59,7 +46,7 @@ export function AddMember({ studyId, personId, members, onAdded }: AddMemberProp
       />
       <RadioField label="Role" control={control} name="role" choices={roleChoices} />
       <div>
-        <Button type="submit" appearance="primary" disabledFocusable={formState.isSubmitting}>
+        <Button type="submit" appearance="primary" disabledFocusable={busy}>
           Add the member
         </Button>
       </div>

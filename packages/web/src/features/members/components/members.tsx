@@ -50,7 +50,7 @@ export function Members({ studyId, personId, mayChange, onLeft }: MembersProps) 
       {mayChange ? (
         <TitledSection title="Add a member" level={2}>
           <div className={styles.add}>
-            <AddMember studyId={studyId} personId={personId} members={members} onAdded={setSaid} />
+            <AddMember studyId={studyId} members={members} onAdded={setSaid} />
           </div>
         </TitledSection>
       ) : (

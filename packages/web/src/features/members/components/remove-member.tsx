@@ -1,6 +1,7 @@
-import { Button, MessageBar, MessageBarBody, makeStyles } from '@fluentui/react-components';
+import { Button, makeStyles } from '@fluentui/react-components';
 import { messageOf } from '../../../shared/api/faults';
 import { DialogBox } from '../../../shared/ui/dialog-box';
+import { Notice } from '../../../shared/ui/notice';
 import { type Member, useRemoveMember } from '../api/members';
 
 const useStyles = makeStyles({
@@ -28,9 +29,9 @@ export function RemoveMember({ studyId, member, self, onRemoved, onLeft, onClose
       {(close) => (
         <div className={styles.body}>
           {remove.isError && (
-            <MessageBar intent="error" layout="multiline" role="alert">
-              <MessageBarBody>{messageOf(remove.error)}</MessageBarBody>
-            </MessageBar>
+            <Notice intent="error" role="alert">
+              {messageOf(remove.error)}
+            </Notice>
           )}
           <p>
             {self

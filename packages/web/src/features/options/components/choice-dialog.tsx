@@ -1,105 +1,96 @@
-import { Button, Field, makeStyles, Radio, RadioGroup } from '@fluentui/react-components';
-import { zodResolver } from '@hookform/resolvers/zod';
-import { useQuery } from '@tanstack/react-query';
-import { useController, useForm } from 'react-hook-form';
-import { useChange } from '../../../shared/api/use-change';
-import { DialogBox } from '../../../shared/ui/dialog-box';
-import { Form } from '../../../shared/ui/form';
+import type { DesignSetView } from '@steelyard/api/contract/design-sets';
+import { useQueryClient } from '@tanstack/react-query';
+import { useMemo } from 'react';
+import { RadioField } from '../../../shared/ui/radio-field';
 import { TextAreaField } from '../../../shared/ui/text-area-field';
-import { dropValues, keptValues, useKeptValues } from '../../../shared/ui/use-kept-values';
-import { sessionQuery } from '../../access/api/access';
+import { keepDesignSet } from '../../designs/api/design-set';
+import { useKeptForm } from '../../unsaved/api/use-kept-form';
+import { BothVersions, BothVersionsByHistory } from '../../unsaved/components/both-versions';
+import { KeptDialog } from '../../unsaved/components/kept-dialog';
+import { differencesOf } from '../../unsaved/model/differences';
 import type { Weighed, Weighing } from '../../weigh/model/weighing';
 import { recordChoice } from '../api/options';
-import { type ChoiceForm, choiceFormSchema, choiceOf } from '../model/choice-form';
-
-const useStyles = makeStyles({
-  actions: { display: 'flex', flexWrap: 'wrap', justifyContent: 'flex-end', gap: '8px' },
-});
+import { type ChoiceForm, choiceBodyOf, choiceFormSchema, choiceOf } from '../model/choice-form';
 
 /** Which option, why, and why not each other. */
 export function ChoiceDialog({ weighing, onClose }: { weighing: Weighing; onClose: () => void }) {
-  const styles = useStyles();
+  const queryClient = useQueryClient();
   const { study, designSet, options } = weighing;
-  const { choice } = designSet;
-  const { change, fault, stale, busy } = useChange(study.id);
-  const key = `steelyard-choice/${useQuery(sessionQuery()).data?.id}/${study.id}`;
-  const form = useForm<ChoiceForm>({
-    defaultValues: keptValues<ChoiceForm>(key) ?? choiceOf(choice),
-    resolver: zodResolver(choiceFormSchema(options)),
+  const kept = useKeptForm({
+    what: `${study.id}/choice`,
+    view: designSet,
+    valuesOf,
+    schema: useMemo(() => choiceFormSchema(options), [options]),
+    bodyOf: versioned,
+    send: (form) => recordChoice(study.id, choiceBodyOf(form, options)),
+    onStored: (view) => keepDesignSet(queryClient, study.id, view),
   });
-  useKeptValues(form, key);
-  const { control, handleSubmit, watch } = form;
-  const { field, fieldState } = useController({ control, name: 'optionId' });
-  const chosen = watch('optionId');
+  const { control } = kept.form;
+  const chosen = kept.values.optionId;
   const others = options.filter(({ id }) => id !== chosen);
-  const theirs = options.find(({ id }) => id === choice?.optionId);
-  const now = theirs ? `Now the choice is ${theirs.name}: ${choice?.why}` : 'Now there is no choice.';
-
-  const send = handleSubmit(({ optionId, why, whyNot }) =>
-    change(() =>
-      recordChoice(study.id, {
-        version: designSet.version,
-        optionId,
-        why,
-        whyNot: others.flatMap(({ id }) => {
-          const reason = whyNot[id]?.trim();
-          return reason ? [{ optionId: id, why: reason }] : [];
-        }),
-      }),
-    ).then((done) => {
-      if (!done) return;
-      dropValues(key);
-      onClose();
-    }),
-  );
+  const theirs = kept.theirs?.view?.choice;
+  const both = kept.theirs && {
+    differences: differencesOf(
+      told(kept.values, options),
+      told(valuesOf(kept.theirs.view), options),
+      (label) => label,
+    ),
+    onKeepMine: kept.keepMine,
+    onTakeTheirs: kept.takeTheirs,
+  };
 
   return (
-    <DialogBox title="Record the choice" onClose={onClose}>
-      {(close) => (
-        <Form
-          label="Choice"
-          fault={stale ? `${fault} ${now} Record yours in its place, or cancel.` : fault}
-          onSubmit={() => void send()}
-        >
-          <Field
-            label="The option settled on"
-            validationState={fieldState.error ? 'error' : 'none'}
-            validationMessage={fieldState.error?.message}
-          >
-            <RadioGroup value={field.value} onChange={(_, { value }) => field.onChange(value)}>
-              {options.filter(mayBeChosen).map(({ id, letter, name }) => (
-                <Radio key={id} value={id} label={`${letter}, ${name}`} />
-              ))}
-            </RadioGroup>
-          </Field>
-          <TextAreaField label="Why this one" rows={3} control={control} name="why" />
-          {chosen &&
-            others.map((option) => (
-              <TextAreaField
-                key={option.id}
-                label={`Why not ${option.letter}, ${option.name}`}
-                hint={mayBeChosen(option) ? undefined : `Ruled out: ${option.ruling?.reason}`}
-                control={control}
-                name={`whyNot.${option.id}`}
-              />
-            ))}
-          <div className={styles.actions}>
-            <Button
-              onClick={() => {
-                dropValues(key);
-                close();
-              }}
-            >
-              Cancel
-            </Button>
-            <Button type="submit" appearance="primary" disabledFocusable={busy}>
-              Record the choice
-            </Button>
-          </div>
-        </Form>
-      )}
-    </DialogBox>
+    <KeptDialog
+      title="Record the choice"
+      label="Choice"
+      verb="Record the choice"
+      kept={kept}
+      conflict={
+        both &&
+        (theirs ? (
+          <BothVersions {...both} by={theirs.by} at={theirs.at} />
+        ) : (
+          <BothVersionsByHistory {...both} studyId={study.id} what="the choice" />
+        ))
+      }
+      onClose={onClose}
+    >
+      <RadioField
+        label="The option settled on"
+        control={control}
+        name="optionId"
+        choices={options
+          .filter(mayBeChosen)
+          .map(({ id, letter, name }) => ({ value: id, label: `${letter}, ${name}` }))}
+      />
+      <TextAreaField label="Why this one" rows={3} control={control} name="why" />
+      {chosen &&
+        others.map((option) => (
+          <TextAreaField
+            key={option.id}
+            label={`Why not ${option.letter}, ${option.name}`}
+            hint={mayBeChosen(option) ? undefined : `Ruled out: ${option.ruling?.reason}`}
+            control={control}
+            name={`whyNot.${option.id}`}
+          />
+        ))}
+    </KeptDialog>
   );
 }
 
 const mayBeChosen = ({ ruling }: Weighed): boolean => ruling?.kind !== 'not-admissible';
+
+const valuesOf = (set: DesignSetView | null): ChoiceForm => choiceOf(set?.choice ?? null);
+
+const versioned = (values: ChoiceForm, version: number | null) => ({ ...values, version });
+
+/** A choice as one reads it, by what each part is called. */
+function told({ optionId, why, whyNot }: ChoiceForm, options: readonly Weighed[]): Record<string, string> {
+  const chosen = options.find(({ id }) => id === optionId);
+  const against = options.map(({ id, letter, name }) => [`Why not ${letter}, ${name}`, whyNot[id] ?? '']);
+  return {
+    'The option settled on': chosen ? `${chosen.letter}, ${chosen.name}` : 'none',
+    'Why this one': why,
+    ...Object.fromEntries(against),
+  };
+}

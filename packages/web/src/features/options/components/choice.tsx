@@ -17,6 +17,7 @@ const useStyles = makeStyles({
     borderRadius: '10px',
     backgroundColor: tokens.colorNeutralBackground1,
     overflowWrap: 'anywhere',
+    '@media print': { breakInside: 'avoid' },
   },
   heading: {
     marginBottom: '6px',
@@ -36,6 +37,7 @@ const useStyles = makeStyles({
     alignItems: 'center',
     justifyContent: 'space-between',
   },
+  actions: { '@media print': { display: 'none' } },
   note: { color: tokens.colorNeutralForeground2, fontSize: '13px' },
 });
 
@@ -78,7 +80,7 @@ export function Choice({ weighing, onChange }: { weighing: Weighing; onChange: (
           Recorded by {choice.by}, <Moment iso={choice.at} />
         </p>
         {mayDecide(study.role) && (
-          <span>
+          <span className={styles.actions}>
             <Button size="small" onClick={onChange}>
               Change
             </Button>{' '}

@@ -1,16 +1,11 @@
-import {
-  Button,
-  MessageBar,
-  MessageBarActions,
-  MessageBarBody,
-  makeStyles,
-} from '@fluentui/react-components';
+import { Button, makeStyles } from '@fluentui/react-components';
 import type { AuditView } from '@steelyard/api/contract/audit';
 import type { OptionView } from '@steelyard/api/contract/design-sets';
 import { useQuery } from '@tanstack/react-query';
 import { api } from '../../../shared/api/client';
 import { fullDate } from '../../../shared/format/times';
 import { DataTable } from '../../../shared/ui/data-table';
+import { Notice } from '../../../shared/ui/notice';
 import type { KeptDraft } from '../../designs/model/drafts';
 import { differences } from '../../designs/model/option-draft';
 
@@ -37,22 +32,26 @@ export function Conflict({ studyId, draft, stored, onKeepMine, onTakeTheirs }: C
   );
   const rows = differences(draft, stored);
   return (
-    <MessageBar intent="warning" layout="multiline" className={styles.bar} role="alert">
-      <MessageBarBody>
-        <strong>{change?.by ?? 'Someone else'}</strong> stored another version
-        {change && ` on ${fullDate(change.at)}`} while you were editing. Yours is kept here.
-        <div className={styles.table}>
-          <DataTable
-            label="Both versions"
-            columns={[{ label: 'What differs' }, { label: 'Yours' }, { label: 'Theirs' }]}
-            rows={rows.map(({ label, mine, theirs }) => ({ key: label, cells: [label, mine, theirs] }))}
-          />
-        </div>
-      </MessageBarBody>
-      <MessageBarActions>
-        <Button onClick={onKeepMine}>Keep mine</Button>
-        <Button onClick={onTakeTheirs}>Take theirs</Button>
-      </MessageBarActions>
-    </MessageBar>
+    <Notice
+      intent="warning"
+      className={styles.bar}
+      role="alert"
+      actions={
+        <>
+          <Button onClick={onKeepMine}>Keep mine</Button>
+          <Button onClick={onTakeTheirs}>Take theirs</Button>
+        </>
+      }
+    >
+      <strong>{change?.by ?? 'Someone else'}</strong> stored another version
+      {change && ` on ${fullDate(change.at)}`} while you were editing. Yours is kept here.
+      <div className={styles.table}>
+        <DataTable
+          label="Both versions"
+          columns={[{ label: 'What differs' }, { label: 'Yours' }, { label: 'Theirs' }]}
+          rows={rows.map(({ label, mine, theirs }) => ({ key: label, cells: [label, mine, theirs] }))}
+        />
+      </div>
+    </Notice>
   );
 }

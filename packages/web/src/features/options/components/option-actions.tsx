@@ -20,14 +20,16 @@ interface OptionActionsProps {
 /** What may be done with an option as a whole. */
 export function OptionActions({ option, weighing, onSelect }: OptionActionsProps) {
   const styles = useStyles();
-  const { study, designSet, hold } = weighing;
+  const { study, designSet } = weighing;
   const { change, fault, busy } = useChange(study.id);
   const order = designSet.options.map(({ id }) => id);
   const { id, position } = option;
 
   const move = (to: number) => {
     const next = order.toSpliced(position, 1).toSpliced(to, 0, id);
-    void change(() => putDesignSet(study.id, { version: designSet.version, hold, order: next }));
+    void change(() =>
+      putDesignSet(study.id, { version: designSet.version, hold: designSet.hold, order: next }),
+    );
   };
   const duplicate = () => change(async () => onSelect((await duplicateOption(study.id, id)).id));
   const remove = async () => {

@@ -3,10 +3,10 @@ import { planningValueTraits } from '@steelyard/calc';
 import { useState } from 'react';
 import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { NumberField } from '../../../shared/ui/number-field';
-import { ownTokens } from '../../../shared/ui/own-tokens';
 import { TextAreaField } from '../../../shared/ui/text-area-field';
 import type { OptionDraft } from '../../designs/families/family-ui';
-import type { Assumption } from '../../weigh/model/assumptions';
+import { useLedgerStyles } from '../../weigh/components/ledger-styles';
+import { type Assumption, sourceInWords } from '../../weigh/model/assumptions';
 
 const useStyles = makeStyles({
   line: {
@@ -14,22 +14,6 @@ const useStyles = makeStyles({
     gridTemplateColumns: 'minmax(0, 1fr) auto auto',
     gap: '2px 8px',
     alignItems: 'center',
-  },
-  label: { overflowWrap: 'anywhere' },
-  value: {
-    minWidth: '72px',
-    padding: '2px 9px',
-    textAlign: 'end',
-    borderRadius: '5px',
-    border: `1px solid ${tokens.colorNeutralStroke2}`,
-    backgroundColor: ownTokens.brassSoft,
-  },
-  note: {
-    gridColumn: '1 / -1',
-    color: tokens.colorNeutralForeground2,
-    fontSize: '13px',
-    lineHeight: '17px',
-    overflowWrap: 'anywhere',
   },
   own: {
     gridColumn: '1 / -1',
@@ -49,7 +33,7 @@ interface OverrideFieldsProps {
 
 /** A planning value as the ledger has it and, beside it, the option's own with the reason. */
 export function OverrideFields({ form, assumption, outcomeUnit }: OverrideFieldsProps) {
-  const styles = useStyles();
+  const styles = { ...useStyles(), ...useLedgerStyles() };
   const { key, label, ledger } = assumption;
   const override = useWatch({ control: form.control, name: `plan.overrides.${key}` });
   const [opened, setOpened] = useState(false);
@@ -74,11 +58,7 @@ export function OverrideFields({ form, assumption, outcomeUnit }: OverrideFields
       >
         {open ? 'Undo' : 'Override'}
       </Button>
-      {ledger && (
-        <span className={styles.note}>
-          {[...(ledger.range ? [ledger.range] : []), ledger.source].join(' · ')}
-        </span>
-      )}
+      {ledger && <span className={styles.note}>{sourceInWords(ledger)}</span>}
       {open && (
         <div className={styles.own}>
           <NumberField

@@ -6,7 +6,13 @@ import type { Weighing } from '../../weigh/model/weighing';
 import { restoreOption } from '../api/options';
 
 const useStyles = makeStyles({
-  removed: { marginTop: '10px', color: tokens.colorNeutralForeground2, fontSize: '13px', lineHeight: '20px' },
+  removed: {
+    marginTop: '10px',
+    color: tokens.colorNeutralForeground2,
+    fontSize: '13px',
+    lineHeight: '20px',
+    '@media print': { display: 'none' },
+  },
   line: {
     display: 'flex',
     flexWrap: 'wrap',

@@ -1,4 +1,5 @@
 import type { ChoiceView } from '@steelyard/api/contract/design-sets';
+import type { NewChoice } from '@steelyard/api/contract/options';
 import { z } from 'zod';
 import type { Weighed } from '../../weigh/model/weighing';
 
@@ -13,6 +14,7 @@ export interface ChoiceForm {
 export const choiceFormSchema = (options: readonly Weighed[]) =>
   z
     .object({
+      version: z.number().int(),
       optionId: z.string().min(1, 'Choose an option.'),
       why: z.string().trim().min(1, 'Say why this option.').max(4000),
       whyNot: z.record(z.string(), z.string().max(4000).or(z.undefined())),
@@ -29,3 +31,19 @@ export const choiceOf = (choice: ChoiceView | null): ChoiceForm => ({
   why: choice?.why ?? '',
   whyNot: Object.fromEntries((choice?.whyNot ?? []).map(({ optionId, why }) => [optionId, why])),
 });
+
+/** The choice as it is sent: a reason for each option that was not chosen and has one. */
+export function choiceBodyOf(
+  { version, optionId, why, whyNot }: ChoiceForm & { version: number },
+  options: readonly Weighed[],
+): NewChoice {
+  return {
+    version,
+    optionId,
+    why,
+    whyNot: options.flatMap(({ id }) => {
+      const reason = whyNot[id]?.trim();
+      return id !== optionId && reason ? [{ optionId: id, why: reason }] : [];
+    }),
+  };
+}

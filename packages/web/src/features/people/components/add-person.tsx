@@ -1,12 +1,9 @@
 import { Button, Checkbox } from '@fluentui/react-components';
-import { zodResolver } from '@hookform/resolvers/zod';
 import { type InvitationView, newAccountSchema } from '@steelyard/api/contract/people';
-import { useState } from 'react';
-import { useController, useForm } from 'react-hook-form';
+import { useController } from 'react-hook-form';
 import { z } from 'zod';
-import { placeFaults } from '../../../shared/api/faults';
 import { Form, TextField } from '../../../shared/ui/form';
-import { dropValues, keptValues, useKeptValues } from '../../../shared/ui/use-kept-values';
+import { useKeptForm } from '../../unsaved/api/use-kept-form';
 import { useInvite } from '../api/people';
 
 const formSchema = newAccountSchema.extend({
@@ -16,37 +13,21 @@ const formSchema = newAccountSchema.extend({
 
 type NewPerson = z.infer<typeof formSchema>;
 
-const nobody: NewPerson = { name: '', email: '', administrator: false };
+const nobody = (): NewPerson => ({ name: '', email: '', administrator: false });
 
-interface AddPersonProps {
-  /** Who adds somebody. */
-  personId: string;
-  onInvited: (invitation: InvitationView) => void;
-}
-
-export function AddPerson({ personId, onInvited }: AddPersonProps) {
-  const [fault, setFault] = useState<string>();
+export function AddPerson({ onInvited }: { onInvited: (invitation: InvitationView) => void }) {
   const invite = useInvite();
-  const key = `steelyard-new-person/${personId}`;
-  const form = useForm<NewPerson>({
-    resolver: zodResolver(formSchema),
-    defaultValues: keptValues(key) ?? nobody,
+  const { form, fault, busy, submit } = useKeptForm({
+    what: 'new-person',
+    view: null,
+    valuesOf: nobody,
+    schema: formSchema,
+    bodyOf: (values) => values,
+    send: (account: NewPerson) => invite.mutateAsync(account),
+    onSaved: onInvited,
   });
-  useKeptValues(form, key);
-  const { control, handleSubmit, setError, reset, formState } = form;
+  const { control } = form;
   const { field: administrator } = useController({ control, name: 'administrator' });
-
-  const submit = handleSubmit(async (account) => {
-    setFault(undefined);
-    await invite.mutateAsync(account).then(
-      (invitation) => {
-        reset(nobody);
-        dropValues(key);
-        onInvited(invitation);
-      },
-      (error) => setFault(placeFaults(error, ['name', 'email'], setError)),
-    );
-  });
 
   return (
     <Form label="Add a person" fault={fault} onSubmit={() => void submit()}>
@@ -59,7 +40,7 @@ export function AddPerson({ personId, onInvited }: AddPersonProps) {
         onBlur={administrator.onBlur}
       />
       <div>
-        <Button type="submit" appearance="primary" disabledFocusable={formState.isSubmitting}>
+        <Button type="submit" appearance="primary" disabledFocusable={busy}>
           Add the person
         </Button>
       </div>

@@ -1,7 +1,8 @@
-import { Button, MessageBar, MessageBarBody, makeStyles } from '@fluentui/react-components';
+import { Button, makeStyles } from '@fluentui/react-components';
 import type { AccountView, InvitationView } from '@steelyard/api/contract/people';
 import { messageOf } from '../../../shared/api/faults';
 import { DialogBox } from '../../../shared/ui/dialog-box';
+import { Notice } from '../../../shared/ui/notice';
 import { useNewLink } from '../api/people';
 
 const useStyles = makeStyles({
@@ -24,9 +25,9 @@ export function NewLink({ account: { id, name }, onInvited, onClose }: NewLinkPr
       {(close) => (
         <div className={styles.body}>
           {make.isError && (
-            <MessageBar intent="error" layout="multiline" role="alert">
-              <MessageBarBody>{messageOf(make.error)}</MessageBarBody>
-            </MessageBar>
+            <Notice intent="error" role="alert">
+              {messageOf(make.error)}
+            </Notice>
           )}
           <p>
             With the link {name} chooses a new password. A link made before stops working. Whoever holds the

@@ -1,4 +1,5 @@
-import { makeStyles, Skeleton, SkeletonItem } from '@fluentui/react-components';
+import { makeStyles } from '@fluentui/react-components';
+import { Skeleton, SkeletonItem } from '../../../shared/ui/skeleton';
 
 const useStyles = makeStyles({ skeleton: { display: 'grid', gap: '10px' } });
 

@@ -17,7 +17,7 @@ const useStyles = makeStyles({
 });
 
 /** Everybody with an account, and a way in for those without. */
-export function People({ personId }: { personId: string }) {
+export function People() {
   const styles = useStyles();
   const { data: people } = useSuspenseQuery(peopleQuery());
   const [asked, setAsked] = useState<AccountView>();
@@ -35,7 +35,7 @@ export function People({ personId }: { personId: string }) {
           methodologists of the studies.
         </p>
         <div className={styles.add}>
-          <AddPerson personId={personId} onInvited={setInvitation} />
+          <AddPerson onInvited={setInvitation} />
         </div>
       </TitledSection>
       {asked && <NewLink account={asked} onInvited={setInvitation} onClose={() => setAsked(undefined)} />}

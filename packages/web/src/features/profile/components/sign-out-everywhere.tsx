@@ -1,6 +1,7 @@
-import { Button, MessageBar, MessageBarBody, makeStyles } from '@fluentui/react-components';
+import { Button, makeStyles } from '@fluentui/react-components';
 import { useMutation } from '@tanstack/react-query';
 import { messageOf } from '../../../shared/api/faults';
+import { Notice } from '../../../shared/ui/notice';
 import { signOutEverywhere } from '../api/profile';
 
 const useStyles = makeStyles({ body: { display: 'grid', gap: '14px' } });
@@ -12,9 +13,9 @@ export function SignOutEverywhere({ onSignedOut }: { onSignedOut: () => void }) 
     <div className={styles.body}>
       <p>Ends your sessions in every browser and on every device, this one too. Sign in again to go on.</p>
       {leave.isError && (
-        <MessageBar intent="error" layout="multiline" role="alert">
-          <MessageBarBody>{messageOf(leave.error)}</MessageBarBody>
-        </MessageBar>
+        <Notice intent="error" role="alert">
+          {messageOf(leave.error)}
+        </Notice>
       )}
       <div>
         <Button disabledFocusable={leave.isPending} onClick={() => leave.mutate()}>

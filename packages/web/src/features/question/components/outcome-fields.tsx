@@ -1,9 +1,13 @@
+import type { Hypothesis } from '@steelyard/calc';
 import type { Control, UseFormSetValue } from 'react-hook-form';
 import { TextField } from '../../../shared/ui/form';
 import { NumberField } from '../../../shared/ui/number-field';
 import { RadioField } from '../../../shared/ui/radio-field';
 import { TextAreaField } from '../../../shared/ui/text-area-field';
-import { basisWords, type QuestionValues } from '../model/question-form';
+import { betterWords, isRatio } from '../model/outcome-values';
+import { basisWords, hypothesisWords, type QuestionValues, usualAlpha } from '../model/question-form';
+import { OutcomeKindFields } from './outcome-kind-fields';
+import { TargetFields } from './target-fields';
 
 export interface QuestionPartProps {
   control: Control<QuestionValues>;
@@ -16,71 +20,30 @@ export function OutcomeFields({ control, values, setValue }: QuestionPartProps) 
   const { kind } = values.plan.outcome;
   return (
     <>
-      <TextField
-        label="Outcome"
-        hint="What is measured in each participant, and when."
+      <OutcomeKindFields
         control={control}
-        name="outcomeLabel"
-        autoComplete="off"
-      />
-      <RadioField
-        label="Kind of outcome"
-        control={control}
-        name="plan.outcome.kind"
-        choices={[
-          { value: 'continuous', label: 'Continuous: a measured amount, compared by its mean' },
-          { value: 'binary', label: 'Binary: it happens or it does not, compared by proportions' },
-        ]}
-        // A difference of means is none of proportions, and a proportion has no unit.
+        names={{ label: 'outcomeLabel', kind: 'plan.outcome.kind', unit: 'outcomeUnit' }}
+        kind={kind}
+        // A difference of means is none of proportions, and only a mean has a unit.
         onChosen={(chosen) => {
           setValue('plan.outcome.difference', undefined);
-          if (chosen === 'binary') setValue('outcomeUnit', '');
+          if (chosen !== 'continuous') setValue('outcomeUnit', '');
         }}
       />
-      {kind === 'continuous' && (
-        <TextField
-          label="Unit"
-          hint="As it stands behind a number, such as g/L; empty where there is none."
-          control={control}
-          name="outcomeUnit"
-          autoComplete="off"
-        />
-      )}
       <RadioField
         label="Better is"
         control={control}
         name="plan.outcome.better"
-        choices={
-          kind === 'continuous'
-            ? [
-                { value: 'higher', label: 'A higher value' },
-                { value: 'lower', label: 'A lower value' },
-              ]
-            : [
-                { value: 'higher', label: 'A larger proportion' },
-                { value: 'lower', label: 'A smaller proportion' },
-              ]
-        }
+        choices={Object.entries(betterWords[kind]).map(([value, label]) => ({ value, label }))}
       />
-      {kind === 'continuous' ? (
-        <NumberField
-          key="mean"
-          label="Target difference"
-          hint="Active minus control: negative where the treatment lowers the outcome."
-          unit={values.outcomeUnit}
-          control={control}
-          name="plan.outcome.difference"
-        />
-      ) : (
-        <NumberField
-          key="proportion"
-          kind="percent"
-          label="Target difference, in percentage points"
-          hint="Active minus control: negative where the treatment makes it rarer. The control proportion is in the ledger."
-          control={control}
-          name="plan.outcome.difference"
-        />
-      )}
+      <TargetFields
+        control={control}
+        setValue={setValue}
+        within="plan.outcome"
+        kind={kind}
+        unit={values.outcomeUnit}
+        withinMargin={values.plan.test.hypothesis !== 'superiority'}
+      />
     </>
   );
 }
@@ -108,19 +71,58 @@ export function BasisFields({ control }: QuestionPartProps) {
 }
 
 /** How the difference is tested. */
-export function TestFields({ control }: QuestionPartProps) {
+export function TestFields({ control, values, setValue }: QuestionPartProps) {
+  const { outcome, test } = values.plan;
+  const usual = test.alpha === usualAlpha[test.hypothesis];
   return (
     <>
-      <NumberField label="Type I error" kind="percent" control={control} name="plan.test.alpha" />
       <RadioField
-        label="Sides"
+        label="Hypothesis"
         control={control}
-        name="plan.test.sides"
-        choices={[
-          { value: 2, label: 'Two-sided' },
-          { value: 1, label: 'One-sided' },
-        ]}
+        name="plan.test.hypothesis"
+        choices={Object.entries(hypothesisWords).map(([value, label]) => ({ value, label }))}
+        onChosen={(chosen) => {
+          setValue('plan.test.sides', chosen === 'superiority' ? 2 : 1);
+          if (usual) setValue('plan.test.alpha', usualAlpha[chosen as Hypothesis]);
+        }}
       />
+      {test.hypothesis !== 'superiority' && (
+        <NumberField
+          key={`margin-${outcome.kind === 'binary' ? 'percent' : 'number'}`}
+          label={outcome.kind === 'binary' ? 'Margin, in percentage points' : 'Margin'}
+          hint={
+            isRatio(outcome.kind)
+              ? 'A ratio above 1: the worst one that would still do, or its inverse.'
+              : 'Above 0: the worst difference that would still do.'
+          }
+          {...(outcome.kind === 'continuous' ? { unit: values.outcomeUnit } : {})}
+          {...(outcome.kind === 'binary' ? { kind: 'percent' as const } : {})}
+          control={control}
+          name="plan.test.margin"
+        />
+      )}
+      <NumberField
+        label="Type I error"
+        hint={
+          test.hypothesis === 'superiority'
+            ? undefined
+            : 'Of one side: usually 2.5 % for non-inferiority, 5 % for each of the two tests of equivalence.'
+        }
+        kind="percent"
+        control={control}
+        name="plan.test.alpha"
+      />
+      {test.hypothesis === 'superiority' && (
+        <RadioField
+          label="Sides"
+          control={control}
+          name="plan.test.sides"
+          choices={[
+            { value: 2, label: 'Two-sided' },
+            { value: 1, label: 'One-sided' },
+          ]}
+        />
+      )}
     </>
   );
 }

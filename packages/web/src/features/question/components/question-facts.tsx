@@ -1,10 +1,13 @@
 import { makeStyles, tokens } from '@fluentui/react-components';
 import type { StudyView } from '@steelyard/api/contract/studies';
+import type { QuestionOutcome } from '@steelyard/calc';
 import type { ReactNode } from 'react';
 import { capitalised } from '../../../shared/format/lists';
 import { figure, percent, withUnit } from '../../../shared/format/numbers';
 import { type Fact, Facts } from '../../../shared/ui/facts';
 import { TitledSection } from '../../../shared/ui/titled-section';
+import { marginInWords, points } from '../model/margin-words';
+import { betterWords, kindWords } from '../model/outcome-values';
 import { basisWords, strategyWords } from '../model/question-form';
 
 const useStyles = makeStyles({
@@ -23,11 +26,9 @@ export function QuestionFacts({ study }: { study: StudyView }) {
     <div className={styles.parts}>
       <p className={styles.question}>{study.question}</p>
       <Part title="Outcome, target difference and test">
-        <Facts facts={[...outcomeFacts(study), { name: 'Type I error', value: percent(test.alpha, 3) }]} />
+        <Facts facts={[...outcomeFacts(study), ...testFacts(study)]} />
         <p>{test.sides === 2 ? 'The test is two-sided.' : 'The test is one-sided.'}</p>
-        {outcome.better && (
-          <p>{`A ${outcome.better} ${outcome.kind === 'binary' ? 'proportion' : 'value'} is better.`}</p>
-        )}
+        {outcome.better && <p>{`${betterWords[outcome.kind][outcome.better]} is better.`}</p>}
       </Part>
       <Part title="Basis of the target difference">
         {basis ? (
@@ -77,15 +78,52 @@ export function QuestionFacts({ study }: { study: StudyView }) {
   );
 }
 
-function outcomeFacts({ plan: { outcome }, outcomeLabel, outcomeUnit }: StudyView): Fact[] {
-  const shown =
-    outcome.kind === 'binary'
-      ? percent(outcome.difference, 3).replace('%', 'percentage points')
-      : withUnit(figure(outcome.difference), outcomeUnit);
+function outcomeFacts({ plan: { outcome, test }, outcomeLabel, outcomeUnit }: StudyView): Fact[] {
   return [
     { name: 'Outcome', value: capitalised(outcomeLabel) },
-    { name: 'Kind', value: outcome.kind === 'binary' ? 'Binary' : 'Continuous' },
-    { name: 'Target difference', value: shown },
+    { name: 'Kind', value: kindWords[outcome.kind].name },
+    ...targetFacts(outcome, outcomeUnit, test.hypothesis === 'superiority' ? 'Target' : 'Assumed'),
+  ];
+}
+
+function targetFacts(outcome: QuestionOutcome, unit: string, looked: 'Target' | 'Assumed'): Fact[] {
+  switch (outcome.kind) {
+    case 'continuous':
+      return [{ name: `${looked} difference`, value: withUnit(figure(outcome.difference), unit) }];
+    case 'binary':
+      return [{ name: `${looked} difference`, value: points(outcome.difference) }];
+    case 'time-to-event':
+      return [
+        { name: `${looked} hazard ratio`, value: figure(outcome.hazardRatio) },
+        { name: 'Survival stated at', value: `${figure(outcome.survivalAt)} months` },
+        {
+          name: 'Accrual, then follow-up',
+          value: `${figure(outcome.accrual)}, ${figure(outcome.followUp)} months`,
+        },
+      ];
+    case 'count':
+      return [
+        { name: `${looked} rate ratio`, value: figure(outcome.rateRatio) },
+        { name: 'Exposure of each participant', value: figure(outcome.exposure) },
+      ];
+    case 'ordinal':
+      return [
+        { name: `${looked} odds ratio`, value: figure(outcome.oddsRatio) },
+        {
+          name: 'Controls by category',
+          value: outcome.controlProbabilities.map((share) => percent(share, 3)).join(', '),
+        },
+      ];
+  }
+}
+
+function testFacts(study: StudyView): Fact[] {
+  const { test } = study.plan;
+  const margin = marginInWords(study);
+  return [
+    { name: 'Hypothesis', value: capitalised(test.hypothesis) },
+    ...(margin === undefined ? [] : [{ name: 'Margin', value: margin }]),
+    { name: 'Type I error', value: percent(test.alpha, 3) },
   ];
 }
 

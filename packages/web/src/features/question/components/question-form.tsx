@@ -1,15 +1,15 @@
-import { Button, makeStyles } from '@fluentui/react-components';
+import { makeStyles } from '@fluentui/react-components';
 import { newQuestionSchema } from '@steelyard/api/contract/question';
 import { useQueryClient } from '@tanstack/react-query';
 import { type ReactNode, useDeferredValue, useMemo, useState } from 'react';
 import { Form, TextField } from '../../../shared/ui/form';
 import { TextAreaField } from '../../../shared/ui/text-area-field';
 import { TitledSection } from '../../../shared/ui/titled-section';
-import { useKeptForm } from '../../studies/api/use-kept-form';
-import { BothVersionsByHistory } from '../../studies/components/both-versions';
-import { EffectsTable } from '../../studies/components/effects-table';
-import { differencesOf } from '../../studies/model/differences';
+import { SaveEnd } from '../../studies/components/save-end';
 import { type Effect, effectsOf, type Stored } from '../../studies/model/effects';
+import { useKeptForm } from '../../unsaved/api/use-kept-form';
+import { BothVersionsByHistory } from '../../unsaved/components/both-versions';
+import { differencesOf } from '../../unsaved/model/differences';
 import { keepStudy, putQuestion } from '../api/question';
 import { questionBodyOf, questionLabel, questionValuesOf, typedPlan } from '../model/question-form';
 import { EstimandFields } from './estimand-fields';
@@ -18,16 +18,14 @@ import { NounFields, TreatmentFields } from './word-fields';
 
 const useStyles = makeStyles({
   part: { display: 'grid', gap: '14px', maxWidth: '640px' },
-  actions: { display: 'flex', flexWrap: 'wrap', gap: '8px' },
 });
 
 /** A study’s question as its methodologist and investigator change it. */
 export function QuestionForm({ stored }: { stored: Stored }) {
-  const styles = useStyles();
   const queryClient = useQueryClient();
   const { study, designSet, costs } = stored;
   const [saved, setSaved] = useState<Effect[]>();
-  const { form, values, changed, fault, theirs, submit, discard, takeTheirs, keepMine } = useKeptForm({
+  const kept = useKeptForm({
     what: `${study.id}/question`,
     view: study,
     valuesOf: (view) => questionValuesOf(view ?? study),
@@ -37,6 +35,7 @@ export function QuestionForm({ stored }: { stored: Stored }) {
     onStored: (view) => view && keepStudy(queryClient, view),
     onSaved: (view) => setSaved(effectsOf(stored, { question: view.plan })),
   });
+  const { form, values, fault, theirs, submit, takeTheirs, keepMine } = kept;
   const asked = useDeferredValue(JSON.stringify(typedPlan(values) ?? null));
   const effects = useMemo(() => {
     const question = JSON.parse(asked);
@@ -47,7 +46,7 @@ export function QuestionForm({ stored }: { stored: Stored }) {
   const currency = costs.costs.currency;
 
   return (
-    <Form label="Question" onSubmit={submit} fault={fault}>
+    <Form label="Question" onSubmit={() => void submit()} fault={fault}>
       {theirs?.view && (
         <BothVersionsByHistory
           studyId={study.id}
@@ -80,26 +79,7 @@ export function QuestionForm({ stored }: { stored: Stored }) {
       <Part title="Words for people and places">
         <NounFields control={control} />
       </Part>
-      {changed && effects && (
-        <EffectsTable
-          label="Options before and after the question changes"
-          effects={effects}
-          currency={currency}
-        />
-      )}
-      {!changed && saved && (
-        <EffectsTable label="Options before and after the change" effects={saved} currency={currency} saved />
-      )}
-      <div className={styles.actions}>
-        <Button
-          type="submit"
-          appearance="primary"
-          disabledFocusable={!changed || form.formState.isSubmitting}
-        >
-          Save the question
-        </Button>
-        {changed && <Button onClick={discard}>Discard my changes</Button>}
-      </div>
+      <SaveEnd verb="Save the question" currency={currency} kept={kept} effects={effects} saved={saved} />
     </Form>
   );
 }

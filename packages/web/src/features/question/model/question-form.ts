@@ -1,6 +1,15 @@
 import { type Basis, type Estimand, newQuestionSchema } from '@steelyard/api/contract/question';
 import type { Noun, StudyView, Treatment } from '@steelyard/api/contract/studies';
-import type { OutcomeKind, QuestionPlan } from '@steelyard/calc';
+import type { Hypothesis, QuestionPlan } from '@steelyard/calc';
+import { type OutcomeValues, outcomeBodyOf, outcomeValuesOf } from './outcome-values';
+
+export interface TestValues {
+  hypothesis: Hypothesis;
+  alpha: number | undefined;
+  sides: 1 | 2;
+  margin: number | undefined;
+  reference: 't' | 'normal' | undefined;
+}
 
 export interface QuestionValues {
   name: string;
@@ -9,13 +18,8 @@ export interface QuestionValues {
   outcomeLabel: string;
   outcomeUnit: string;
   plan: {
-    outcome: {
-      kind: OutcomeKind;
-      difference: number | undefined;
-      better: 'higher' | 'lower' | undefined;
-      method: string | undefined;
-    };
-    test: QuestionPlan['test'] | { alpha: number | undefined };
+    outcome: OutcomeValues;
+    test: TestValues;
   };
   basis: { kind: Basis['kind'] | undefined; toWhom: string; why: string };
   estimand: Estimand;
@@ -34,13 +38,8 @@ export function questionValuesOf(study: StudyView): QuestionValues {
     outcomeLabel: study.outcomeLabel,
     outcomeUnit: study.outcomeUnit,
     plan: {
-      outcome: {
-        kind: outcome.kind,
-        difference: outcome.difference,
-        better: outcome.better,
-        method: outcome.kind === 'binary' ? outcome.method : undefined,
-      },
-      test,
+      outcome: outcomeValuesOf(outcome),
+      test: { ...test, margin: test.margin, reference: test.reference },
     },
     basis: study.basis ?? { kind: undefined, toWhom: '', why: '' },
     estimand: study.estimand ?? {
@@ -58,7 +57,6 @@ export function questionValuesOf(study: StudyView): QuestionValues {
 
 /** What the form comes to: what was left empty is not stated. */
 export function questionBodyOf(values: QuestionValues, version: number | null) {
-  const { kind, difference, better, method } = values.plan.outcome;
   const { basis, estimand, clusters } = values;
   const saysEstimand =
     estimand.intercurrentEvents.length > 0 ||
@@ -66,18 +64,22 @@ export function questionBodyOf(values: QuestionValues, version: number | null) {
   return {
     ...values,
     version,
-    plan: {
-      ...values.plan,
-      outcome: {
-        kind,
-        difference,
-        ...(better ? { better } : {}),
-        ...(kind === 'binary' && method ? { method } : {}),
-      },
-    },
+    plan: { outcome: outcomeBodyOf(values.plan.outcome), test: testBodyOf(values.plan.test) },
     basis: basis.kind || stated(basis.toWhom) || stated(basis.why) ? basis : null,
     estimand: saysEstimand ? estimand : null,
     clusters: stated(clusters.one) || stated(clusters.many) ? clusters : null,
+  };
+}
+
+/** A superiority test has no margin, the others one side. */
+function testBodyOf({ hypothesis, alpha, sides, margin, reference }: TestValues) {
+  const superiority = hypothesis === 'superiority';
+  return {
+    hypothesis,
+    alpha,
+    sides: superiority ? sides : 1,
+    ...(superiority ? {} : { margin }),
+    ...(reference ? { reference } : {}),
   };
 }
 
@@ -91,6 +93,19 @@ export const basisWords: Record<Basis['kind'], string> = {
   important: 'It is important',
   realistic: 'It is realistic',
   both: 'It is both important and realistic',
+};
+
+export const hypothesisWords: Record<Hypothesis, string> = {
+  superiority: 'Superiority: there is a difference',
+  'non-inferiority': 'Non-inferiority: not worse by the margin',
+  equivalence: 'Equivalence: within the margin either way',
+};
+
+/** The type I error that is usual: one side of non-inferiority takes half of what two-sided superiority does. */
+export const usualAlpha: Record<Hypothesis, number> = {
+  superiority: 0.05,
+  'non-inferiority': 0.025,
+  equivalence: 0.05,
 };
 
 export const strategyWords: Record<Estimand['intercurrentEvents'][number]['strategy'], string> = {
@@ -111,6 +126,16 @@ const labels: Record<string, string> = {
   'plan.outcome.difference': 'Target difference',
   'plan.outcome.better': 'Better is',
   'plan.outcome.method': 'Method of comparison',
+  'plan.outcome.hazardRatio': 'Target hazard ratio',
+  'plan.outcome.survivalAt': 'Month at which survival is stated',
+  'plan.outcome.accrual': 'Accrual',
+  'plan.outcome.followUp': 'Follow-up after accrual',
+  'plan.outcome.rateRatio': 'Target rate ratio',
+  'plan.outcome.exposure': 'Exposure of each participant',
+  'plan.outcome.oddsRatio': 'Target odds ratio',
+  'plan.outcome.controlProbabilities': 'Shares of the categories',
+  'plan.test.hypothesis': 'Hypothesis',
+  'plan.test.margin': 'Margin',
   'plan.test.alpha': 'Type I error',
   'plan.test.sides': 'Sides',
   'basis.kind': 'Basis',
@@ -129,6 +154,9 @@ const labels: Record<string, string> = {
 /** What a part of the form is called. */
 export function questionLabel(path: string): string {
   const [part, place, leaf] = path.replace('estimand.', '').split('.');
+  if (path.startsWith('plan.outcome.controlProbabilities.')) {
+    return `Category ${Number(path.split('.').at(-1)) + 1}`;
+  }
   if (part === 'treatments') return `Treatment ${Number(place) + 1}`;
   if (part === 'intercurrentEvents') return `Intercurrent event ${Number(place) + 1}, ${leaf}`;
   return labels[path] ?? path;

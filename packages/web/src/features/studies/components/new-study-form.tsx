@@ -3,15 +3,18 @@ import type { StudyView } from '@steelyard/api/contract/studies';
 import { studyStartSchema } from '@steelyard/api/contract/study-start';
 import { useQueryClient } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
+import type { Control } from 'react-hook-form';
 import { Form, TextField } from '../../../shared/ui/form';
 import { NumberField } from '../../../shared/ui/number-field';
 import { RadioField } from '../../../shared/ui/radio-field';
 import { TextAreaField } from '../../../shared/ui/text-area-field';
 import { TitledSection } from '../../../shared/ui/titled-section';
+import { OutcomeKindFields } from '../../question/components/outcome-kind-fields';
+import { TargetFields } from '../../question/components/target-fields';
+import { useKeptForm } from '../../unsaved/api/use-kept-form';
 import { startStudy, studyQuery } from '../api/studies';
-import { useKeptForm } from '../api/use-kept-form';
 import { toReplace } from '../model/assumed';
-import { newStudyBodyOf, newStudyValues } from '../model/new-study-form';
+import { type NewStudyValues, newStudyBodyOf, newStudyValues } from '../model/new-study-form';
 
 const useStyles = makeStyles({
   form: { maxWidth: '640px' },
@@ -30,7 +33,7 @@ const useStyles = makeStyles({
 export function NewStudyForm({ onStarted }: { onStarted: (study: StudyView) => void }) {
   const styles = useStyles();
   const queryClient = useQueryClient();
-  const { form, values, changed, fault, submit, discard } = useKeptForm({
+  const { form, values, changed, fault, busy, submit, discard } = useKeptForm({
     what: 'new-study',
     view: null as StudyView | null,
     valuesOf: newStudyValues,
@@ -45,12 +48,11 @@ export function NewStudyForm({ onStarted }: { onStarted: (study: StudyView) => v
   });
   const { control } = form;
   const { outcome, randomises } = values;
-  const continuous = outcome.kind === 'continuous';
   const assumes = `Leave it empty where you do not know it yet: a round figure is then taken, marked “${toReplace}”.`;
 
   return (
     <div className={styles.form}>
-      <Form label="New study" onSubmit={submit} fault={fault}>
+      <Form label="New study" onSubmit={() => void submit()} fault={fault}>
         <Part title="The question">
           <TextAreaField
             label="Question"
@@ -79,61 +81,21 @@ export function NewStudyForm({ onStarted }: { onStarted: (study: StudyView) => v
           </div>
         </Part>
         <Part title="Outcome and target difference">
-          <TextField
-            label="Outcome"
-            hint="What is measured in each participant, and when."
+          <OutcomeKindFields
             control={control}
-            name="outcome.label"
-            autoComplete="off"
-          />
-          <RadioField
-            label="Kind of outcome"
-            control={control}
-            name="outcome.kind"
-            choices={[
-              { value: 'continuous', label: 'Continuous: a measured amount, compared by its mean' },
-              { value: 'binary', label: 'Binary: it happens or it does not, compared by proportions' },
-            ]}
+            names={{ label: 'outcome.label', kind: 'outcome.kind', unit: 'outcome.unit' }}
+            kind={outcome.kind}
             onChosen={() => form.setValue('outcome.difference', undefined)}
           />
-          {continuous && (
-            <TextField
-              label="Unit"
-              hint="As it stands behind a number, such as g/L; empty where there is none."
-              control={control}
-              name="outcome.unit"
-              autoComplete="off"
-            />
-          )}
           <div className={styles.pair}>
-            <NumberField
-              key={`difference-${outcome.kind}`}
-              label={continuous ? 'Target difference' : 'Target difference, in percentage points'}
-              hint="The smallest the trial must be able to find. Active minus control: negative where it lowers the outcome."
-              kind={continuous ? 'number' : 'percent'}
-              {...(continuous ? { unit: outcome.unit } : {})}
+            <TargetFields
               control={control}
-              name="outcome.difference"
+              setValue={form.setValue}
+              within="outcome"
+              kind={outcome.kind}
+              unit={outcome.unit}
             />
-            {continuous ? (
-              <NumberField
-                key="sd"
-                label="Standard deviation"
-                hint={assumes}
-                unit={outcome.unit}
-                control={control}
-                name="sd"
-              />
-            ) : (
-              <NumberField
-                key="proportion"
-                label="Control proportion"
-                hint={assumes}
-                kind="percent"
-                control={control}
-                name="controlProportion"
-              />
-            )}
+            <NeededField control={control} outcome={outcome} hint={assumes} />
           </div>
         </Part>
         <Part title="Who takes part">
@@ -186,7 +148,7 @@ export function NewStudyForm({ onStarted }: { onStarted: (study: StudyView) => v
           {toReplace}” in the ledger and under costs, until you put what you know in their place.
         </p>
         <div className={styles.actions}>
-          <Button type="submit" appearance="primary" disabledFocusable={form.formState.isSubmitting}>
+          <Button type="submit" appearance="primary" disabledFocusable={busy}>
             Start weighing
           </Button>
           {changed && <Button onClick={discard}>Clear the form</Button>}
@@ -194,6 +156,43 @@ export function NewStudyForm({ onStarted }: { onStarted: (study: StudyView) => v
       </Form>
     </div>
   );
+}
+
+/** The planning value that the kind of outcome cannot do without. */
+function NeededField(props: {
+  control: Control<NewStudyValues>;
+  outcome: NewStudyValues['outcome'];
+  hint: string;
+}) {
+  const { outcome, ...field } = props;
+  switch (outcome.kind) {
+    case 'continuous':
+      return <NumberField key="sd" label="Standard deviation" unit={outcome.unit} name="sd" {...field} />;
+    case 'binary':
+      return (
+        <NumberField
+          key="proportion"
+          label="Control proportion"
+          kind="percent"
+          name="controlProportion"
+          {...field}
+        />
+      );
+    case 'time-to-event':
+      return (
+        <NumberField
+          key="survival"
+          label="Controls free of the event by then"
+          kind="percent"
+          name="controlSurvival"
+          {...field}
+        />
+      );
+    case 'count':
+      return <NumberField key="rate" label="Control rate" name="controlRate" {...field} />;
+    case 'ordinal':
+      return null;
+  }
 }
 
 function Part({ title, children }: { title: string; children: ReactNode }) {

@@ -1,8 +1,9 @@
-import { makeStyles, Skeleton, SkeletonItem, tokens } from '@fluentui/react-components';
+import { makeStyles, tokens } from '@fluentui/react-components';
 import type { StudySummary } from '@steelyard/api/contract/studies';
 import { capitalised, counted } from '../../../shared/format/lists';
 import { Chip } from '../../../shared/ui/chip';
 import { Moment } from '../../../shared/ui/moment';
+import { Skeleton, SkeletonItem } from '../../../shared/ui/skeleton';
 import { TextLink } from '../../../shared/ui/text-link';
 
 const useStyles = makeStyles({

@@ -1,18 +1,16 @@
 import type { Noun, Treatment } from '@steelyard/api/contract/studies';
+import { neededValue } from '@steelyard/api/contract/study-start';
+import { noOutcome, type OutcomeValues, outcomeBodyOf } from '../../question/model/outcome-values';
 
 export interface NewStudyValues {
   name: string;
   organisation: string;
   question: string;
-  outcome: {
-    kind: 'continuous' | 'binary';
-    label: string;
-    unit: string;
-    better: 'higher' | 'lower' | undefined;
-    difference: number | undefined;
-  };
+  outcome: OutcomeValues & { label: string; unit: string };
   sd: number | undefined;
   controlProportion: number | undefined;
+  controlSurvival: number | undefined;
+  controlRate: number | undefined;
   participants: Noun;
   clusters: Noun;
   treatments: Treatment[];
@@ -24,9 +22,11 @@ export const newStudyValues = (): NewStudyValues => ({
   name: '',
   organisation: '',
   question: '',
-  outcome: { kind: 'continuous', label: '', unit: '', better: undefined, difference: undefined },
+  outcome: { ...noOutcome, label: '', unit: '' },
   sd: undefined,
   controlProportion: undefined,
+  controlSurvival: undefined,
+  controlRate: undefined,
   participants: { one: 'participant', many: 'participants' },
   clusters: { one: 'cluster', many: 'clusters' },
   treatments: [{ name: 'Control' }, { name: 'New treatment' }],
@@ -35,15 +35,19 @@ export const newStudyValues = (): NewStudyValues => ({
 
 /** What the form comes to: only what bears on the kind of outcome and on who is randomised. */
 export function newStudyBodyOf(values: NewStudyValues) {
-  const { outcome, sd, controlProportion, clusters, randomises, ...rest } = values;
-  const continuous = outcome.kind === 'continuous';
-  const { better, ...asked } = outcome;
+  const { outcome, sd, controlProportion, controlSurvival, controlRate, clusters, randomises, ...rest } =
+    values;
+  const needed = neededValue[outcome.kind];
+  const stated = needed && values[needed];
   return {
     ...rest,
     randomises,
-    outcome: { ...asked, unit: continuous ? outcome.unit : '', ...(better ? { better } : {}) },
+    outcome: {
+      ...outcomeBodyOf(outcome),
+      label: outcome.label,
+      unit: outcome.kind === 'continuous' ? outcome.unit : '',
+    },
     clusters: randomises === 'clusters' ? clusters : null,
-    ...(continuous && sd !== undefined ? { sd } : {}),
-    ...(!continuous && controlProportion !== undefined ? { controlProportion } : {}),
+    ...(needed && stated !== undefined ? { [needed]: stated } : {}),
   };
 }

@@ -1,13 +1,16 @@
 import { useQuery, useSuspenseQueries } from '@tanstack/react-query';
-import { useMemo } from 'react';
+import { useMemo, useState } from 'react';
 import { sessionQuery } from '../../access/api/access';
 import { designSetQuery, limitsQuery } from '../../designs/api/design-set';
 import { draftKey, useDrafts } from '../../designs/model/drafts';
 import { costsQuery, ledgerQuery, studyQuery } from '../../studies/api/studies';
-import { type Weighing, weighingOf } from '../model/weighing';
+import { type WeighedBefore, type Weighing, weighingOf } from '../model/weighing';
 
-/** Asks for a study's parts at once and weighs its options, with the person's drafts; suspends until all are there. */
-export function useWeighing(studyId: string): Weighing {
+/**
+ * Asks for a study's parts at once and weighs its options, with the person's drafts or as they are stored; suspends
+ * until all are there.
+ */
+export function useWeighing(studyId: string, as: 'edited' | 'stored' = 'edited'): Weighing {
   const [study, ledger, costs, designSet, limits] = useSuspenseQueries({
     queries: [
       studyQuery(studyId),
@@ -19,16 +22,22 @@ export function useWeighing(studyId: string): Weighing {
   });
   const drafts = useDrafts((kept) => kept.drafts);
   const personId = useQuery(sessionQuery()).data?.id ?? '';
+  const sizing = useDrafts((kept) => kept.sizings[draftKey(personId, studyId)]);
+  const [before] = useState<WeighedBefore>(() => new Map());
   return useMemo(
     () =>
-      weighingOf({
-        study: study.data,
-        ledger: ledger.data,
-        costs: costs.data,
-        designSet: designSet.data,
-        limits: limits.data,
-        draftOf: (optionId) => drafts[draftKey(personId, optionId)],
-      }),
-    [study.data, ledger.data, costs.data, designSet.data, limits.data, drafts, personId],
+      weighingOf(
+        {
+          study: study.data,
+          ledger: ledger.data,
+          costs: costs.data,
+          designSet: designSet.data,
+          limits: limits.data,
+          draftOf: (optionId) => (as === 'edited' ? drafts[draftKey(personId, optionId)] : undefined),
+          sizing: as === 'edited' ? sizing : undefined,
+        },
+        before,
+      ),
+    [study.data, ledger.data, costs.data, designSet.data, limits.data, drafts, sizing, personId, before, as],
   );
 }

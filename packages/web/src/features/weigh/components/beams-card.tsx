@@ -1,9 +1,14 @@
 import { Button, makeStyles, tokens } from '@fluentui/react-components';
 import { useState } from 'react';
-import { beamsFinding } from '../model/beams';
+import { Word } from '../../../shared/ui/words';
+import { referenceOf } from '../model/against';
+import { measuresOf } from '../model/beam-measures';
+import { beamScale, beamsFinding, beamsLegend } from '../model/beams';
 import type { Weighing } from '../model/weighing';
+import { AgainstBar } from './against-bar';
 import { Beams } from './beams';
 import { BeamsTable } from './beams-table';
+import { useWeighView } from './use-weigh-view';
 
 const useStyles = makeStyles({
   card: {
@@ -11,6 +16,7 @@ const useStyles = makeStyles({
     borderRadius: '10px',
     backgroundColor: tokens.colorNeutralBackground1,
     overflow: 'hidden',
+    '@media print': { breakInside: 'avoid' },
   },
   table: { padding: '10px 14px' },
   foot: {
@@ -25,6 +31,7 @@ const useStyles = makeStyles({
     fontSize: '13px',
     lineHeight: '18px',
   },
+  words: { flex: '1 1 240px', minWidth: 0 },
   finding: { color: tokens.colorNeutralForeground1 },
   toggle: { fontWeight: 400, '@media print': { display: 'none' } },
 });
@@ -38,21 +45,34 @@ interface BeamsCardProps {
 /** The options' beams, or the same figures as a table. */
 export function BeamsCard({ weighing, selected, onSelect }: BeamsCardProps) {
   const styles = useStyles();
+  const { view, show } = useWeighView();
   const [asTable, setAsTable] = useState(false);
-  const { options, currency } = weighing;
+  const measures = measuresOf(weighing);
+  const measure = measures.find(({ key }) => key === view.beams) ?? measures[0];
+  const scale = beamScale(weighing, measure);
+  const reference = referenceOf(weighing, view.against);
   return (
     <section aria-label="Options side by side" className={styles.card}>
+      <AgainstBar reference={reference} onBack={() => show({ against: undefined })} />
       {asTable ? (
         <div className={styles.table}>
-          <BeamsTable weighing={weighing} />
+          <BeamsTable weighing={weighing} reference={reference} />
         </div>
       ) : (
-        <Beams weighing={weighing} selected={selected} onSelect={onSelect} />
+        <Beams
+          weighing={weighing}
+          measures={measures}
+          measure={measure}
+          scale={scale}
+          reference={reference}
+          selected={selected}
+          onSelect={onSelect}
+        />
       )}
       <div className={styles.foot}>
-        <p>
-          <span className={styles.finding}>{beamsFinding(options, currency)}</span> Control outlined, active
-          filled, on one scale.
+        <p className={styles.words}>
+          <span className={styles.finding}>{beamsFinding(weighing, measure)}</span>{' '}
+          <Word is="beam">Beams</Word> run from 0 to {measure.show(scale)}. {beamsLegend(weighing, measure)}.
         </p>
         <Button
           size="small"

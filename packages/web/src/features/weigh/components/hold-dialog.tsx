@@ -1,115 +1,112 @@
-import { Button, makeStyles, Radio, RadioGroup } from '@fluentui/react-components';
-import { zodResolver } from '@hookform/resolvers/zod';
-import { type Hold, holdSchema } from '@steelyard/calc';
-import { useQuery } from '@tanstack/react-query';
-import { Controller, useForm } from 'react-hook-form';
-import { useChange } from '../../../shared/api/use-change';
-import { DialogBox } from '../../../shared/ui/dialog-box';
-import { Form } from '../../../shared/ui/form';
+import type { DesignSetView } from '@steelyard/api/contract/design-sets';
+import { changedDesignSetSchema } from '@steelyard/api/contract/options';
+import type { Hold } from '@steelyard/calc';
+import { useQueryClient } from '@tanstack/react-query';
 import { NumberField } from '../../../shared/ui/number-field';
-import { dropValues, keptValues, useKeptValues } from '../../../shared/ui/use-kept-values';
-import { sessionQuery } from '../../access/api/access';
-import { putDesignSet } from '../../designs/api/design-set';
-import { holdInWords } from '../model/hold-words';
+import { textOf } from '../../../shared/ui/number-field-text';
+import { RadioField } from '../../../shared/ui/radio-field';
+import { keepDesignSet, putDesignSet } from '../../designs/api/design-set';
+import { useKeptForm } from '../../unsaved/api/use-kept-form';
+import { BothVersionsByHistory } from '../../unsaved/components/both-versions';
+import { KeptDialog } from '../../unsaved/components/kept-dialog';
+import { differencesOf } from '../../unsaved/model/differences';
+import { textOfValues } from '../../unsaved/model/kept-edits';
+import { useSizes } from '../api/use-sizes';
+import { entersSizes } from '../model/enters-sizes';
+import { holdMeanings } from '../model/hold-words';
 import type { Weighing } from '../model/weighing';
 
-const useStyles = makeStyles({
-  actions: { display: 'flex', justifyContent: 'flex-end', gap: '8px' },
-});
-
 interface HoldForm {
-  kind: Hold['kind'];
-  power: number | undefined;
-  budget?: number | undefined;
+  hold: { kind: Hold['kind']; power: number | undefined; budget: number | undefined };
 }
 
-export const holdMeanings: Record<Hold['kind'], string> = {
-  power: 'Power: each option takes the fewest units that reach it.',
-  budget: 'Budget: each option takes the most units within it.',
-  sizes: 'Sizes: each option keeps the size entered for it.',
-};
+const names: Record<Hold['kind'], string> = { power: 'Power', budget: 'Budget', sizes: 'Sizes' };
+const labels: Record<string, string> = { kind: 'Keep equal', power: 'Power, %', budget: 'Budget' };
 
 /** What is kept equal, and at what. */
 export function HoldDialog({ weighing, onClose }: { weighing: Weighing; onClose: () => void }) {
-  const styles = useStyles();
-  const { study, designSet, hold, limits, currency } = weighing;
-  const { change, fault, stale, busy } = useChange(study.id);
-  const key = `steelyard-hold/${useQuery(sessionQuery()).data?.id}/${study.id}`;
-  const form = useForm<HoldForm, unknown, Hold>({
-    defaultValues: keptValues<HoldForm>(key) ?? {
-      kind: hold.kind,
-      power: hold.power,
-      budget: hold.kind === 'budget' ? hold.budget : limits.limits.money,
-    },
-    resolver: (values, context, options) => {
-      const { kind, power, budget } = values;
-      const asked = (kind === 'budget' ? { kind, power, budget } : { kind, power }) as HoldForm;
-      return zodResolver<HoldForm, unknown, Hold>(holdSchema as never)(asked, context, options);
-    },
+  const queryClient = useQueryClient();
+  const { study, designSet, limits, currency } = weighing;
+  const sizes = useSizes(weighing);
+  const valuesOf = (view: DesignSetView | null): HoldForm => {
+    const { kind, power, ...rest } = (view ?? designSet).hold;
+    return { hold: { kind, power, budget: 'budget' in rest ? rest.budget : limits.limits.money } };
+  };
+  const kept = useKeptForm({
+    what: `${study.id}/hold`,
+    view: designSet,
+    valuesOf,
+    schema: changedDesignSetSchema,
+    bodyOf: ({ hold }, version, view) => ({
+      // Sizes are tried out first; what is held meanwhile stays.
+      hold: holdIn(entersSizes(hold.kind, weighing) ? { ...valuesOf(view).hold, power: hold.power } : hold),
+      version,
+      order: (view ?? designSet).options.map(({ id }) => id),
+    }),
+    send: async (body) =>
+      textOfValues(body.hold) === textOfValues(designSet.hold) ? designSet : putDesignSet(study.id, body),
+    onStored: (view) => keepDesignSet(queryClient, study.id, view),
+    onSaved: (_, { hold }) => (entersSizes(hold.kind, weighing) ? sizes.hold() : sizes.undo()),
   });
-  useKeptValues(form, key);
-  const { control, handleSubmit, watch } = form;
-  const kind = watch('kind');
+  const { control } = kept.form;
+  const { kind } = kept.values.hold;
   return (
-    <DialogBox title="What is kept equal" onClose={onClose}>
-      {(close) => (
-        <Form
-          label="Hold"
-          fault={
-            stale
-              ? `${fault} Now: ${holdInWords(hold.kind, hold, currency)}. Save yours in its place, or cancel.`
-              : fault
-          }
-          onSubmit={() =>
-            void handleSubmit(async (next) => {
-              const order = designSet.options.map(({ id }) => id);
-              const body = { version: designSet.version, hold: next, order };
-              if (!(await change(() => putDesignSet(study.id, body)))) return;
-              dropValues(key);
-              close();
-            })()
-          }
-        >
-          <Controller
-            control={control}
-            name="kind"
-            render={({ field }) => (
-              <RadioGroup
-                aria-label="Keep equal"
-                value={field.value}
-                onChange={(_, data) => field.onChange(data.value)}
-              >
-                {Object.entries(holdMeanings).map(([value, label]) => (
-                  <Radio key={value} value={value} label={label} />
-                ))}
-              </RadioGroup>
+    <KeptDialog
+      title="What is kept equal"
+      label="Hold"
+      verb="Hold"
+      kept={kept}
+      conflict={
+        kept.theirs && (
+          <BothVersionsByHistory
+            studyId={study.id}
+            what="what is held and the order of the options"
+            differences={differencesOf(
+              told(kept.values),
+              told(valuesOf(kept.theirs.view)),
+              (path) => labels[path] ?? path,
             )}
+            onKeepMine={kept.keepMine}
+            onTakeTheirs={kept.takeTheirs}
           />
-          <NumberField
-            label="Power"
-            kind="percent"
-            hint={kind === 'power' ? undefined : 'What every option is judged by.'}
-            control={control}
-            name="power"
-          />
-          {kind === 'budget' && (
-            <NumberField label="Budget" kind="money" unit={currency} control={control} name="budget" />
-          )}
-          <div className={styles.actions}>
-            <Button
-              onClick={() => {
-                dropValues(key);
-                close();
-              }}
-            >
-              Cancel
-            </Button>
-            <Button type="submit" appearance="primary" disabledFocusable={busy}>
-              Hold
-            </Button>
-          </div>
-        </Form>
+        )
+      }
+      onClose={onClose}
+    >
+      <RadioField
+        label="Keep equal"
+        hint={entersSizes(kind, weighing) ? asNow : undefined}
+        control={control}
+        name="hold.kind"
+        choices={kinds.map((value) => ({ value, label: holdMeanings[value] }))}
+      />
+      <NumberField
+        label="Power"
+        kind="percent"
+        hint={kind === 'power' ? undefined : 'What every option is judged by.'}
+        control={control}
+        name="hold.power"
+      />
+      {kind === 'budget' && (
+        <NumberField label="Budget" kind="money" unit={currency} control={control} name="hold.budget" />
       )}
-    </DialogBox>
+    </KeptDialog>
   );
 }
+
+const asNow = 'Each option is entered at the size it has now, until you save the sizes or undo them.';
+
+const kinds = ['power', 'budget', 'sizes'] as const;
+
+/** Only a held budget states one. */
+const holdIn = ({ kind, power, budget }: HoldForm['hold']) =>
+  kind === 'budget' ? { kind, power, budget } : { kind, power };
+
+const told = ({ hold }: HoldForm) => {
+  const { kind, power, budget } = hold;
+  return {
+    kind: names[kind],
+    power: textOf(power, 'percent'),
+    ...(kind === 'budget' ? { budget: textOf(budget, 'money') } : {}),
+  };
+};

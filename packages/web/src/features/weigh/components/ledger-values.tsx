@@ -1,7 +1,7 @@
 import { makeStyles, mergeClasses, tokens } from '@fluentui/react-components';
-import { ownTokens } from '../../../shared/ui/own-tokens';
 import { Word } from '../../../shared/ui/words';
-import type { Assumption } from '../model/assumptions';
+import { type Assumption, sourceInWords } from '../model/assumptions';
+import { useLedgerStyles } from './ledger-styles';
 
 const useStyles = makeStyles({
   values: { display: 'grid', rowGap: '8px' },
@@ -11,28 +11,12 @@ const useStyles = makeStyles({
     columnGap: '12px',
     alignItems: 'center',
   },
-  label: { overflowWrap: 'anywhere' },
-  value: {
-    minWidth: '72px',
-    padding: '2px 9px',
-    textAlign: 'end',
-    borderRadius: '5px',
-    border: `1px solid ${tokens.colorNeutralStroke2}`,
-    backgroundColor: ownTokens.brassSoft,
-  },
   own: { border: `1px solid ${tokens.colorBrandForeground1}`, fontWeight: 700 },
-  note: {
-    gridColumn: '1 / 3',
-    color: tokens.colorNeutralForeground2,
-    fontSize: '13px',
-    lineHeight: '17px',
-    overflowWrap: 'anywhere',
-  },
 });
 
 /** The planning values an option rests on, each with its range and source, and with its override where it has one. */
 export function LedgerValues({ assumptions }: { assumptions: readonly Assumption[] }) {
-  const styles = useStyles();
+  const styles = { ...useStyles(), ...useLedgerStyles() };
   return (
     <dl className={styles.values}>
       {assumptions.map(({ key, label, used, ledger, reason }) => (
@@ -44,11 +28,7 @@ export function LedgerValues({ assumptions }: { assumptions: readonly Assumption
               <Word is="override">Override</Word>, ledger {ledger?.value ?? 'has no value'}: {reason}
             </dd>
           )}
-          {ledger && (
-            <dd className={styles.note}>
-              {[...(ledger.range ? [ledger.range] : []), ledger.source].join(' · ')}
-            </dd>
-          )}
+          {ledger && <dd className={styles.note}>{sourceInWords(ledger)}</dd>}
         </div>
       ))}
     </dl>

@@ -1,23 +1,20 @@
-import { Button, makeStyles, tokens } from '@fluentui/react-components';
-import { zodResolver } from '@hookform/resolvers/zod';
-import { type LimitKey, type Limits, limitsSchema } from '@steelyard/calc';
-import { useQuery } from '@tanstack/react-query';
+import { makeStyles, tokens } from '@fluentui/react-components';
+import { type LimitsView, newLimitsSchema } from '@steelyard/api/contract/limits';
+import type { LimitKey, Limits } from '@steelyard/calc';
+import { useQueryClient } from '@tanstack/react-query';
 import { useEffect } from 'react';
-import { useForm } from 'react-hook-form';
-import { useChange } from '../../../shared/api/use-change';
-import { capitalised, list } from '../../../shared/format/lists';
-import { DialogBox } from '../../../shared/ui/dialog-box';
-import { Form } from '../../../shared/ui/form';
+import { capitalised } from '../../../shared/format/lists';
 import { NumberField } from '../../../shared/ui/number-field';
-import { dropValues, keptValues, useKeptValues } from '../../../shared/ui/use-kept-values';
-import { sessionQuery } from '../../access/api/access';
-import { putLimits } from '../../designs/api/design-set';
-import { limitChips } from '../model/standing-words';
+import { textOf } from '../../../shared/ui/number-field-text';
+import { keepLimits, putLimits } from '../../designs/api/design-set';
+import { useKeptForm } from '../../unsaved/api/use-kept-form';
+import { BothVersionsByHistory } from '../../unsaved/components/both-versions';
+import { KeptDialog } from '../../unsaved/components/kept-dialog';
+import { differencesOf } from '../../unsaved/model/differences';
 import type { Weighing } from '../model/weighing';
 
 const useStyles = makeStyles({
   told: { color: tokens.colorNeutralForeground2 },
-  actions: { display: 'flex', justifyContent: 'flex-end', gap: '8px' },
 });
 
 interface LimitsDialogProps {
@@ -27,76 +24,81 @@ interface LimitsDialogProps {
   onClose: () => void;
 }
 
+interface LimitsForm {
+  limits: Limits;
+}
+
+const limitsOf = (view: LimitsView | null): LimitsForm => ({ limits: view?.limits ?? {} });
+const bodyOf = ({ limits }: LimitsForm, version: number | null) => ({ limits, version });
+
 /** The most that exists of each thing an option takes. */
 export function LimitsDialog({ weighing, first, onClose }: LimitsDialogProps) {
   const styles = useStyles();
+  const queryClient = useQueryClient();
   const { study, limits, currency } = weighing;
-  const { change, fault, stale, busy } = useChange(study.id);
-  const key = `steelyard-limits/${useQuery(sessionQuery()).data?.id}/${study.id}`;
-  const form = useForm<Limits>({
-    defaultValues: keptValues<Limits>(key) ?? limits.limits,
-    resolver: zodResolver(limitsSchema),
+  const { clusters } = study;
+  const kept = useKeptForm({
+    what: `${study.id}/limits`,
+    view: limits,
+    valuesOf: limitsOf,
+    schema: newLimitsSchema,
+    bodyOf,
+    send: (body) => putLimits(study.id, body),
+    onStored: (view) => keepLimits(queryClient, study.id, view),
   });
-  useKeptValues(form, key);
-  const { control, handleSubmit, setFocus } = form;
-  const clusters = study.clusters;
-  const now = limitChips(weighing).map(({ says }) => says);
-  const told = stale
-    ? `${fault} Now: ${list(now) || 'no limits'}. Save yours in their place, or cancel.`
-    : fault;
+  const { control, setFocus } = kept.form;
+  const labels: Record<LimitKey, string> = {
+    clusters: capitalised(clusters?.many ?? 'clusters'),
+    participantsPerCluster: `${capitalised(study.participants.many)} in each ${clusters?.one ?? 'cluster'}`,
+    money: 'Money',
+    months: 'Months',
+  };
+  const labelOf = (key: string) => labels[key as LimitKey];
   return (
-    <DialogBox title="Limits" onClose={onClose}>
-      {(close) => (
-        <Form
-          label="Limits"
-          fault={told}
-          onSubmit={() =>
-            void handleSubmit(async (next) => {
-              const body = { version: limits.version, limits: next };
-              if (!(await change(() => putLimits(study.id, body)))) return;
-              dropValues(key);
-              close();
-            })()
-          }
-        >
-          <Focused on={() => first && setFocus(first)} />
-          <p className={styles.told}>The most that exists. What is left empty has no limit.</p>
-          {clusters && (
-            <>
-              <NumberField
-                label={capitalised(clusters.many)}
-                kind="whole"
-                control={control}
-                name="clusters"
-              />
-              <NumberField
-                label={`${capitalised(study.participants.many)} in each ${clusters.one}`}
-                kind="whole"
-                control={control}
-                name="participantsPerCluster"
-              />
-            </>
-          )}
-          <NumberField label="Money" kind="money" unit={currency} control={control} name="money" />
-          <NumberField label="Months" unit="months" control={control} name="months" />
-          <div className={styles.actions}>
-            <Button
-              onClick={() => {
-                dropValues(key);
-                close();
-              }}
-            >
-              Cancel
-            </Button>
-            <Button type="submit" appearance="primary" disabledFocusable={busy}>
-              Set the limits
-            </Button>
-          </div>
-        </Form>
+    <KeptDialog
+      title="Limits"
+      label="Limits"
+      verb="Set the limits"
+      kept={kept}
+      conflict={
+        kept.theirs && (
+          <BothVersionsByHistory
+            studyId={study.id}
+            what="limits"
+            differences={differencesOf(told(kept.values), told(limitsOf(kept.theirs.view)), labelOf)}
+            onKeepMine={kept.keepMine}
+            onTakeTheirs={kept.takeTheirs}
+          />
+        )
+      }
+      onClose={onClose}
+    >
+      <Focused on={() => first && setFocus(`limits.${first}`)} />
+      <p className={styles.told}>The most that exists. What is left empty has no limit.</p>
+      {clusters && (
+        <>
+          <NumberField label={labels.clusters} kind="whole" control={control} name="limits.clusters" />
+          <NumberField
+            label={labels.participantsPerCluster}
+            kind="whole"
+            control={control}
+            name="limits.participantsPerCluster"
+          />
+        </>
       )}
-    </DialogBox>
+      <NumberField label={labels.money} kind="money" unit={currency} control={control} name="limits.money" />
+      <NumberField label={labels.months} unit="months" control={control} name="limits.months" />
+    </KeptDialog>
   );
 }
+
+/** Every limit as its field shows it, a missing one too: that there is none may be what was meant. */
+const told = ({ limits }: LimitsForm): Record<LimitKey, string> => ({
+  clusters: textOf(limits.clusters, 'whole') || 'no limit',
+  participantsPerCluster: textOf(limits.participantsPerCluster, 'whole') || 'no limit',
+  money: textOf(limits.money, 'money') || 'no limit',
+  months: textOf(limits.months, 'number') || 'no limit',
+});
 
 /** Puts the focus where it belongs once the fields are there. */
 function Focused({ on }: { on: () => void }) {

@@ -7,13 +7,18 @@ import { DataTable } from '../../../shared/ui/data-table';
 import { type Fact, Facts } from '../../../shared/ui/facts';
 import { TitledSection } from '../../../shared/ui/titled-section';
 import { Word } from '../../../shared/ui/words';
+import { StructureFacts } from '../../designs/components/structure-facts';
 import { familyUiOf } from '../../designs/families/registry';
+import { mayEdit } from '../../designs/model/rights';
+import { structureInWords } from '../../designs/model/structure-words';
+import { Levers } from '../../levers/components/levers';
 import { assumptionsOf } from '../model/assumptions';
 import type { Weighed, Weighing } from '../model/weighing';
 import { Cautions } from './cautions';
 import { LedgerValues } from './ledger-values';
 import { CostsOfOption, MonthsOfOption } from './money-and-months';
 import { OutOfReach } from './out-of-reach';
+import { useWeighView } from './use-weigh-view';
 
 const useStyles = makeStyles({
   details: {
@@ -27,31 +32,46 @@ const useStyles = makeStyles({
 interface OptionDetailsProps {
   option: Weighed;
   weighing: Weighing;
-  /** Where its structure and overrides are edited; without it the ledger's values are read. */
-  form?: ReactNode;
+  /** The fields in which its structure and overrides are edited; without them both are read. */
+  fields?: ReactNode;
+  /** What may be done with the option as a whole. */
+  actions?: ReactNode;
 }
 
 /** All that is known of one option: its size, what it rests on, its groups, money, months and cautions. */
-export function OptionDetails({ option, weighing, form }: OptionDetailsProps) {
+export function OptionDetails({ option, weighing, fields, actions }: OptionDetailsProps) {
   const styles = useStyles();
+  const { show } = useWeighView();
   const { appraisal } = option;
   const { study, ledger, currency } = weighing;
   const size = appraisal?.feasible ? appraisal : undefined;
   return (
     <div className={styles.details}>
       {size ? <SizeOfOption option={option} weighing={weighing} /> : <OutOfReach option={option} />}
-      {form ?? (
-        <TitledSection
-          level={3}
-          title={
-            <>
-              From the <Word is="ledger">ledger</Word>
-            </>
-          }
-        >
-          <LedgerValues assumptions={assumptionsOf(option, ledger, study.outcomeUnit)} />
-        </TitledSection>
+      {fields ?? (
+        <>
+          {structureInWords(option.plan.structure).length > 0 && (
+            <TitledSection level={3} title="Structure">
+              <StructureFacts plan={option.plan} />
+            </TitledSection>
+          )}
+          <TitledSection
+            level={3}
+            title={
+              <>
+                From the <Word is="ledger">ledger</Word>
+              </>
+            }
+          >
+            <LedgerValues assumptions={assumptionsOf(option, ledger, study.outcomeUnit)} />
+          </TitledSection>
+        </>
       )}
+      <Levers
+        option={option}
+        weighing={weighing}
+        onTried={mayEdit(study.role) ? (tried) => show({ option: tried }) : undefined}
+      />
       {size?.costs && (
         <CostsOfOption costs={size.costs} size={size} arms={option.words.arms} currency={currency} />
       )}
@@ -61,6 +81,7 @@ export function OptionDetails({ option, weighing, form }: OptionDetailsProps) {
           <Cautions cautions={appraisal.cautions} />
         </TitledSection>
       )}
+      {actions}
     </div>
   );
 }
@@ -89,6 +110,7 @@ function SizeOfOption({ option, weighing: { hold } }: { option: Weighed; weighin
 }
 
 function sizeFacts(size: Feasible, { family, plan, words }: Weighed, hold: Hold): Fact[] {
+  const face = familyUiOf(family);
   const { clusters, recruitedClusters, clusterSize } = size;
   const participants = capitalised(words.participants.many);
   const clustersNoun = capitalised(words.clusters.many);
@@ -98,10 +120,15 @@ function sizeFacts(size: Feasible, { family, plan, words }: Weighed, hold: Hold)
     sizes: `as entered: ${power(size.power)}`,
   }[hold.kind];
   return [
-    { name: familyUiOf(family).sizeNoun(plan, words), value: count(size.units), note: reached },
+    { name: face.sizeNoun(plan, words), value: count(size.units), note: reached },
     ...(clusterSize === undefined
       ? []
-      : [{ name: `${participants} in each ${words.clusters.one}`, value: count(clusterSize) }]),
+      : [
+          {
+            name: face.clusterSizeNoun?.(words) ?? `${participants} in each ${words.clusters.one}`,
+            value: count(clusterSize),
+          },
+        ]),
     ...(clusters === undefined ? [] : [{ name: `${clustersNoun} analysed`, value: count(clusters) }]),
     ...(recruitedClusters === undefined
       ? []

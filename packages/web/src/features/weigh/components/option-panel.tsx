@@ -3,9 +3,8 @@ import { ChevronDoubleLeftRegular, ChevronDoubleRightRegular } from '@fluentui/r
 import type { ReactNode } from 'react';
 import { usePreferences } from '../../../shared/preferences';
 import { OptionTag } from '../../../shared/ui/option-tag';
-import { ButtonLink } from '../../../shared/ui/text-link';
 import type { Weighed, Weighing } from '../model/weighing';
-import { OptionDetails } from './option-details';
+import { ToldAgainst } from './told-against';
 
 const wide = '@media (min-width: 1280px)';
 
@@ -22,7 +21,7 @@ const useStyles = makeStyles({
       borderTop: 'none',
       borderLeft: `1px solid ${tokens.colorNeutralStroke2}`,
     },
-    '@media print': { position: 'static', height: 'auto', borderLeft: 'none', overflowY: 'visible' },
+    '@media print': { display: 'none' },
   },
   folded: { [wide]: { padding: '12px 6px', overflowY: 'hidden' } },
   head: { display: 'flex', alignItems: 'flex-start', gap: '10px', marginBottom: '12px' },
@@ -41,24 +40,20 @@ const useStyles = makeStyles({
     flexShrink: 0,
     transform: 'rotate(90deg)',
     [wide]: { transform: 'none' },
-    '@media print': { display: 'none' },
   },
-  links: { marginTop: '16px' },
 });
 
 interface OptionPanelProps {
   option: Weighed;
   weighing: Weighing;
-  workingHref: string;
   /** What stands before the figures: the ruling. */
   ruling: ReactNode;
-  form: ReactNode;
-  /** What may be done with the option as a whole. */
-  actions: ReactNode;
+  /** All that is known of the option, to read or to edit. */
+  details: ReactNode;
 }
 
 /** The chosen option beside the beams, or below them where there is less room; it folds away. */
-export function OptionPanel({ option, weighing, workingHref, ruling, form, actions }: OptionPanelProps) {
+export function OptionPanel({ option, weighing, ruling, details }: OptionPanelProps) {
   const styles = useStyles();
   const folded = usePreferences((preferences) => preferences.panelFolded);
   return (
@@ -86,11 +81,8 @@ export function OptionPanel({ option, weighing, workingHref, ruling, form, actio
       {!folded && (
         <>
           {ruling}
-          <OptionDetails option={option} weighing={weighing} form={form} />
-          <div className={styles.links}>
-            <ButtonLink to={workingHref}>Working</ButtonLink>
-            {actions}
-          </div>
+          <ToldAgainst option={option} weighing={weighing} />
+          {details}
         </>
       )}
     </section>

@@ -1,36 +1,21 @@
-import { makeStyles } from '@fluentui/react-components';
 import type { ReactNode } from 'react';
 import { OptionTag } from '../../../shared/ui/option-tag';
 import { Sheet } from '../../../shared/ui/sheet';
-import { ButtonLink } from '../../../shared/ui/text-link';
 import type { Weighed, Weighing } from '../model/weighing';
-import { OptionDetails } from './option-details';
-
-const useStyles = makeStyles({ links: { marginTop: '16px' } });
+import { ToldAgainst } from './told-against';
 
 interface OptionSheetProps {
   option: Weighed;
   weighing: Weighing;
-  workingHref: string;
   /** What stands before the figures: the ruling. */
   ruling: ReactNode;
-  form: ReactNode;
-  /** What may be done with the option as a whole. */
-  actions: ReactNode;
+  /** All that is known of the option, to read or to edit. */
+  details: ReactNode;
   onClose: () => void;
 }
 
 /** The chosen option over the whole of a small screen. */
-export function OptionSheet({
-  option,
-  weighing,
-  workingHref,
-  ruling,
-  form,
-  actions,
-  onClose,
-}: OptionSheetProps) {
-  const styles = useStyles();
+export function OptionSheet({ option, weighing, ruling, details, onClose }: OptionSheetProps) {
   const title = (
     <>
       <OptionTag
@@ -44,11 +29,8 @@ export function OptionSheet({
   return (
     <Sheet title={title} onClose={onClose}>
       {ruling}
-      <OptionDetails option={option} weighing={weighing} form={form} />
-      <div className={styles.links}>
-        <ButtonLink to={workingHref}>Working</ButtonLink>
-        {actions}
-      </div>
+      <ToldAgainst option={option} weighing={weighing} />
+      {details}
     </Sheet>
   );
 }

@@ -3,7 +3,7 @@ import type { ReactNode } from 'react';
 import { capitalised, counted } from '../../../shared/format/lists';
 import { figure, percent, withUnit } from '../../../shared/format/numbers';
 import { ownTokens } from '../../../shared/ui/own-tokens';
-import { Word } from '../../../shared/ui/words';
+import { marginInWords } from '../../question/model/margin-words';
 import type { Weighing } from '../model/weighing';
 
 const useStyles = makeStyles({
@@ -20,7 +20,7 @@ const useStyles = makeStyles({
     flexWrap: 'wrap',
     alignItems: 'center',
     gap: '8px 14px',
-    padding: '10px 14px',
+    padding: '11px 14px',
     marginBottom: '10px',
     border: `1px solid ${tokens.colorNeutralStroke2}`,
     borderLeft: `4px solid ${tokens.colorBrandForeground1}`,
@@ -31,8 +31,9 @@ const useStyles = makeStyles({
     overflowWrap: 'anywhere',
     '@media (max-width: 640px)': { fontSize: '14px', lineHeight: '20px', padding: '8px 12px' },
   },
+  fits: { borderLeft: `4px solid ${ownTokens.fits}` },
   amiss: { borderLeft: `4px solid ${ownTokens.over}` },
-  label: { color: tokens.colorNeutralForeground2, fontSize: '13px', lineHeight: '18px' },
+  action: { '@media print': { display: 'none' } },
   words: { flex: '1 1 260px', minWidth: 0 },
 });
 
@@ -48,21 +49,23 @@ export function WeighHead({
 }) {
   const styles = useStyles();
   const { study, verdict, options } = weighing;
-  const standing = options.some(({ appraisal }) => appraisal?.feasible);
+  const admitted = options.filter(({ ruling }) => ruling?.kind !== 'not-admissible');
+  const fits = admitted.some(({ standing }) => standing?.fits && standing.uses.length > 0);
+  const amiss = !admitted.some(({ standing }) => standing?.fits);
   return (
     <>
       <h1 className={styles.question}>{study.question}</h1>
       <p className={styles.sub}>{subLine(weighing)}</p>
-      <section aria-label="Verdict" className={mergeClasses(styles.verdict, !standing && styles.amiss)}>
+      <section
+        aria-label="Verdict"
+        className={mergeClasses(styles.verdict, fits && styles.fits, amiss && styles.amiss)}
+      >
         <div className={styles.words}>
-          <p className={styles.label}>
-            <Word is="verdict">Verdict</Word>
-          </p>
           <p>
             <strong>{verdict.headline}</strong> {verdict.detail}
           </p>
         </div>
-        {action}
+        {action && <div className={styles.action}>{action}</div>}
       </section>
       {children}
     </>
@@ -75,13 +78,15 @@ function subLine({ study, ledger, options }: Weighing): string {
     ledger.find((line) => line.key === key && line.family === null)?.value;
   const sd = general('sd');
   const control = general('controlProportion');
-  const { alpha, sides } = plan.test;
+  const { alpha, sides, hypothesis } = plan.test;
+  const margin = marginInWords(study);
   return [
     capitalised(outcomeLabel),
     ...(plan.outcome.kind === 'continuous' && sd !== undefined
       ? [`SD ${withUnit(figure(sd), outcomeUnit)}`]
       : []),
     ...(plan.outcome.kind === 'binary' && control !== undefined ? [`control ${percent(control)}`] : []),
+    ...(margin === undefined ? [] : [`${hypothesis}, margin ${margin}`]),
     `${sides === 2 ? 'two-sided' : 'one-sided'} ${percent(alpha)}`,
     counted(options.length, 'option', 'options') + ruledOut(options),
   ].join(' · ');

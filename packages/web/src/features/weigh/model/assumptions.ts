@@ -17,11 +17,16 @@ export interface Assumption {
   reason: string | undefined;
 }
 
-/** The planning values that reach an option's request, in its family's order. */
-export function assumptionsOf({ family, plan, request }: Weighed, ledger: PlanningValueView[], unit: string) {
+/** “0.4 to 0.75 · Assumed by the team” */
+export const sourceInWords = ({ range, source }: NonNullable<Assumption['ledger']>): string =>
+  range === undefined ? source : `${range} · ${source}`;
+
+/** The planning values that reach an option's request, in its family's order, and one whose lack keeps it from being computed. */
+export function assumptionsOf(option: Weighed, ledger: PlanningValueView[], unit: string) {
+  const { family, plan, request, error } = option;
   return planningValuesOf(family).flatMap(({ path, key }): Assumption[] => {
     const used = numberAt(request, path);
-    if (used === undefined) return [];
+    if (used === undefined && error?.path !== path) return [];
     const show = (value: number) => shown(key, value, unit);
     const line =
       ledger.find((each) => each.key === key && each.family === family) ??
@@ -30,7 +35,7 @@ export function assumptionsOf({ family, plan, request }: Weighed, ledger: Planni
       {
         key,
         label: labelOf(key, line),
-        used: show(used),
+        used: used === undefined ? 'not stated' : show(used),
         ledger: line && {
           value: show(line.value),
           range: rangeOf(line, show),

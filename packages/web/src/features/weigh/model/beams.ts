@@ -1,55 +1,109 @@
-import { money } from '../../../shared/format/money';
-import type { Weighed } from './weighing';
+import { sizeOf } from './against';
+import type { Fill, Measure, PartsTable } from './beam-measures';
+import type { Weighed, Weighing } from './weighing';
 
-/** One arm's stretch of a beam, as shares of the whole width. */
+/** One part's stretch of a beam, as shares of the whole width. */
 export interface BeamPart {
   name: string;
-  cost: number;
+  amount: number;
   from: number;
   width: number;
-  active: boolean;
+  fill: Fill;
 }
 
-/** The scale that all beams share: the dearest option or the limit, rounded up to a figure one can read. */
-export function beamScale(options: readonly Weighed[], limit = 0): number {
-  return niceCeiling(Math.max(limit, ...options.map((option) => totalOf(option) ?? 0)));
+export interface Beam {
+  parts: BeamPart[];
+  /** Where the limit is drawn through; undefined where there is none, or none within sight. */
+  limitAt: number | undefined;
+  /** “Cost by arm: Vehicle gel 246 k€, Active gel 244 k€; the limit is 500 k€”. */
+  says: string;
+  table: PartsTable;
 }
 
-export function beamOf({ appraisal, words }: Weighed, scale: number): BeamPart[] {
-  if (!appraisal?.feasible || !appraisal.costs || scale === 0) return [];
+/** The scale that all beams share: the longest, or a limit within sight, rounded up to a figure one can read. */
+export function beamScale(weighing: Weighing, measure: Measure): number {
+  const longest = Math.max(0, ...weighing.options.map((option) => totalOf(option, measure)));
+  const limits = weighing.options.map((option) => limitOf(option, weighing, measure) ?? 0);
+  return niceCeiling(Math.max(longest, ...limits.filter((limit) => limit <= 2 * longest)));
+}
+
+/** An option as a beam; undefined where it has nothing of the measure. */
+export function beamOf(
+  option: Weighed,
+  weighing: Weighing,
+  measure: Measure,
+  scale: number,
+): Beam | undefined {
+  const size = sizeOf(option);
+  const shares = size ? measure.sharesOf(size, option) : [];
+  if (!size || shares.length === 0 || scale === 0) return undefined;
   let from = 0;
-  return appraisal.costs.arms.map(({ label, total }, arm) => {
-    const part = { name: words.arms[arm] ?? label, cost: total, from, width: total / scale, active: arm > 0 };
+  const parts = shares.map((share) => {
+    const part = { ...share, from, width: share.amount / scale };
     from += part.width;
     return part;
   });
+  const limit = limitOf(option, weighing, measure);
+  const told = shares.map(({ name, amount }) => `${name} ${measure.show(amount)}`).join(', ');
+  return {
+    parts,
+    limitAt: limit !== undefined && limit <= scale ? limit / scale : undefined,
+    says: `${measure.title}: ${told}${limit === undefined ? '' : `; the limit is ${measure.show(limit)}`}`,
+    table: measure.parts(size, option),
+  };
 }
 
-export function beamInWords(parts: readonly BeamPart[], currency: string, limit?: number): string {
-  const arms = parts.map(({ name, cost }) => `${name} ${money(cost, currency)}`).join(', ');
-  return `Cost by arm: ${arms}${limit === undefined ? '' : `; the limit is ${money(limit, currency)}`}`;
+/** How the parts of these beams are told apart. */
+export function beamsLegend({ options }: Weighing, { sharesOf, legend }: Measure): string {
+  const shares = options.flatMap((option) => {
+    const size = sizeOf(option);
+    return size ? sharesOf(size, option) : [];
+  });
+  return legend(new Set(shares.map(({ fill }) => fill)));
+}
+
+/** A table's rows as one sentence, for those who hear it: “Vehicle gel: direct 120 k€, shared 126 k€; …”. */
+export function partsInWords({ columns, rows }: PartsTable): string {
+  const told = rows.map(([name, ...cells]) => {
+    const figures = cells.flatMap((cell, index) =>
+      cell === '' ? [] : [`${columns[index + 1]?.toLocaleLowerCase('en-GB')} ${cell}`],
+    );
+    return `${name}: ${figures.join(', ')}`;
+  });
+  return `${told.join('; ')}.`;
 }
 
 /** What the beams show together: the shortest and the longest. */
-export function beamsFinding(options: readonly Weighed[], currency: string): string {
+export function beamsFinding({ options }: Weighing, measure: Measure): string {
   const known = options.flatMap((option) => {
-    const total = totalOf(option);
-    return total === undefined ? [] : [{ letter: option.letter, total }];
+    const total = totalOf(option, measure);
+    return total > 0 ? [{ letter: option.letter, total }] : [];
   });
   const [first] = known;
-  if (!first) return 'No cost can be shown yet.';
+  if (!first) return 'Nothing can be shown yet.';
   const least = known.reduce((a, b) => (b.total < a.total ? b : a));
   const most = known.reduce((a, b) => (b.total > a.total ? b : a));
-  if (known.length === 1) return `${first.letter} comes to ${money(first.total, currency)}.`;
-  if (least.total === most.total) return `Every beam comes to ${money(first.total, currency)}.`;
-  return `${least.letter} has the shortest beam, ${money(least.total, currency)}; ${most.letter} the longest, ${money(most.total, currency)}.`;
+  const show = ({ total }: { total: number }) => measure.show(total);
+  if (known.length === 1) return `${first.letter} comes to ${show(first)}.`;
+  if (least.total === most.total) return `Every beam comes to ${show(first)}.`;
+  return `${least.letter} has the shortest beam, ${show(least)}; ${most.letter} the longest, ${show(most)}.`;
 }
 
-function totalOf({ appraisal }: Weighed): number | undefined {
-  return appraisal?.feasible ? appraisal.costs?.total : undefined;
+export function totalOf(option: Weighed, { sharesOf }: Measure): number {
+  const size = sizeOf(option);
+  return size ? sharesOf(size, option).reduce((sum, { amount }) => sum + amount, 0) : 0;
 }
 
-const readable = [1, 1.2, 1.5, 2, 2.5, 3, 4, 5, 6, 8, 10];
+/** The limit as an amount of the measure: for this option alone, where it goes by its clusters. */
+function limitOf(option: Weighed, { limits }: Weighing, { limit, limitAt }: Measure): number | undefined {
+  const allowed = limits.limits[limit];
+  if (allowed === undefined || !limitAt) return allowed;
+  const size = sizeOf(option);
+  const taken = option.standing?.uses.find((use) => use.limit === limit)?.taken;
+  return size && taken ? limitAt(size, allowed, taken) : undefined;
+}
+
+const readable = [1, 1.2, 1.5, 2, 2.5, 3, 4, 5, 6, 7, 8, 9, 10];
 
 function niceCeiling(value: number): number {
   if (value <= 0) return 0;

@@ -8,3 +8,9 @@ export function holdInWords(kind: Hold['kind'], hold: Hold, currency: string): s
   if (kind === 'budget') return hold.kind === 'budget' ? `Budget ${money(hold.budget, currency)}` : 'Budget';
   return 'Sizes';
 }
+
+export const holdMeanings: Record<Hold['kind'], string> = {
+  power: 'Power: each option takes the fewest units that reach it.',
+  budget: 'Budget: each option takes the most units within it.',
+  sizes: 'Sizes: each option keeps the size entered for it.',
+};

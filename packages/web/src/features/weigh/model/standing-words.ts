@@ -58,7 +58,9 @@ function relaxation(option: Weighed, words: Words): string[] {
   if (!asked) return ['no relaxation of the limits would do'];
   const limits = asked.changes.map(({ limit, to }) => amountsFor(option, words)[limit](to));
   const size = asked.clusterSize === undefined ? '' : ` at ${count(asked.clusterSize)} each`;
-  if (limits.length === 0) return [size ? `fits${size}` : 'fits at the size that reaches it'];
+  if (limits.length === 0) {
+    return [size ? `fits${size}` : `the size that reaches ${percent(words.hold.power)} fits`];
+  }
   return [`fits from ${list(limits)}${size}`];
 }
 

@@ -26,6 +26,8 @@ const useStyles = makeStyles({
     [stacked]: { display: 'grid', rowGap: '4px', padding: '10px 14px' },
   },
   cell: { padding: '9px 16px', [stacked]: { padding: 0 } },
+  // One above the other, so that a long line leaves the value beside it in sight.
+  maths: { display: 'grid', gap: '8px' },
   label: { width: '30%', minWidth: '210px', [stacked]: { width: 'auto', maxWidth: 'calc(100vw - 60px)' } },
   name: { display: 'block', fontWeight: 700, lineHeight: '18px' },
   source: {
@@ -35,13 +37,21 @@ const useStyles = makeStyles({
     lineHeight: '17px',
   },
   value: {
+    position: 'sticky',
+    right: 0,
+    backgroundColor: tokens.colorNeutralBackground1,
     fontSize: '16px',
     fontWeight: 700,
     textAlign: 'end',
     whiteSpace: 'nowrap',
-    [stacked]: { textAlign: 'start', '::before': { content: '"= "' } },
+    [stacked]: { position: 'static', textAlign: 'start', '::before': { content: '"= "' } },
   },
-  end: { textAlign: 'end' },
+  valueHead: {
+    position: 'sticky',
+    right: 0,
+    backgroundColor: tokens.colorNeutralBackground1,
+    textAlign: 'end',
+  },
 });
 
 /** The arithmetic as a statistician would write it down: formula, figures put in, value, source. */
@@ -53,9 +63,8 @@ export function Steps({ steps }: { steps: readonly Step[] }) {
         <thead className={styles.heads}>
           <tr>
             <th className={styles.head}>Step and source</th>
-            <th className={styles.head}>Formula</th>
-            <th className={styles.head}>With the figures</th>
-            <th className={mergeClasses(styles.head, styles.end)}>Value</th>
+            <th className={styles.head}>Formula, and with the figures</th>
+            <th className={mergeClasses(styles.head, styles.valueHead)}>Value</th>
           </tr>
         </thead>
         <tbody>
@@ -65,10 +74,10 @@ export function Steps({ steps }: { steps: readonly Step[] }) {
                 <span className={styles.name}>{label}</span> <span className={styles.source}>{source}</span>
               </th>
               <td className={styles.cell}>
-                <Maths tex={formula} />
-              </td>
-              <td className={styles.cell}>
-                <Maths tex={substituted} />
+                <div className={styles.maths}>
+                  <Maths tex={formula} />
+                  <Maths tex={substituted} />
+                </div>
               </td>
               <td className={mergeClasses(styles.cell, styles.value)}>{figure(value)}</td>
             </tr>

@@ -1,16 +1,20 @@
 import { makeStyles, tokens } from '@fluentui/react-components';
 import { type AppraisalRequest, explain } from '@steelyard/calc';
+import type { ReactNode } from 'react';
 import { OptionTag } from '../../../shared/ui/option-tag';
 import { optionHue } from '../../../shared/ui/own-tokens';
 import { TextLink } from '../../../shared/ui/text-link';
 import { TitledSection } from '../../../shared/ui/titled-section';
 import { Word } from '../../../shared/ui/words';
+import { StructureFacts } from '../../designs/components/structure-facts';
 import { familyUiOf } from '../../designs/families/registry';
+import { Levers } from '../../levers/components/levers';
 import { Cautions } from '../../weigh/components/cautions';
 import { OutOfReach } from '../../weigh/components/out-of-reach';
 import { assumptionsOf } from '../../weigh/model/assumptions';
 import type { Weighed, Weighing } from '../../weigh/model/weighing';
 import { AssumptionsTable } from './assumptions-table';
+import { ComparisonsTable } from './comparisons-table';
 import { RequestJson } from './request-json';
 import { ScheduleTable } from './schedule-table';
 import { Steps } from './steps';
@@ -21,6 +25,7 @@ const useStyles = makeStyles({
     gridTemplateColumns: 'minmax(0, 1fr)',
     gap: '20px',
     maxWidth: '1120px',
+    '@media (min-width: 1760px)': { maxWidth: '1480px', paddingInline: '28px' },
     padding: '16px 18px 40px',
     '@media (max-width: 640px)': { padding: '12px' },
   },
@@ -33,6 +38,7 @@ const useStyles = makeStyles({
     overflowWrap: 'anywhere',
   },
   sub: { color: tokens.colorNeutralForeground2, fontSize: '13px', lineHeight: '20px' },
+  structure: { maxWidth: '560px', marginTop: '12px', overflowWrap: 'anywhere' },
   trouble: {
     marginTop: '10px',
     padding: '10px 14px',
@@ -46,10 +52,12 @@ interface WorkingProps {
   option: Weighed;
   weighing: Weighing;
   weighHref: string;
+  /** Which version it is the working of, where there are two. */
+  version: ReactNode;
 }
 
 /** How one option's figures come about, step by step, and what they rest on. */
-export function Working({ option, weighing, weighHref }: WorkingProps) {
+export function Working({ option, weighing, weighHref, version }: WorkingProps) {
   const styles = useStyles();
   const { family, plan, words, appraisal, error, request, letter, position, name } = option;
   const { study, ledger } = weighing;
@@ -59,12 +67,17 @@ export function Working({ option, weighing, weighHref }: WorkingProps) {
     <div className={styles.page}>
       <div>
         <div className={styles.heading}>
-          <OptionTag letter={letter} position={position} />
+          <OptionTag
+            letter={letter}
+            position={position}
+            outlined={option.ruling?.kind === 'not-admissible'}
+          />
           <h1 className={styles.name}>{name}: the working</h1>
         </div>
         <p className={styles.sub}>
           {face.summary(plan, size, words)} · <TextLink to={weighHref}>beside the other options</TextLink>
         </p>
+        {version}
         {!size && (
           <div className={styles.trouble}>
             <OutOfReach option={option} />
@@ -73,6 +86,9 @@ export function Working({ option, weighing, weighHref }: WorkingProps) {
       </div>
       <TitledSection level={2} title="Schedule">
         <ScheduleTable schematic={face.schematic(plan, words)} arms={words.arms} hue={optionHue(position)} />
+        <div className={styles.structure}>
+          <StructureFacts plan={plan} />
+        </div>
       </TitledSection>
       {request && !error && (
         <TitledSection level={2} title="Step by step">
@@ -89,6 +105,12 @@ export function Working({ option, weighing, weighHref }: WorkingProps) {
       >
         <AssumptionsTable assumptions={assumptionsOf(option, ledger, study.outcomeUnit)} />
       </TitledSection>
+      {size && size.comparisons.length > 1 && (
+        <TitledSection level={2} title="Comparisons">
+          <ComparisonsTable size={size} arms={words.arms} />
+        </TitledSection>
+      )}
+      <Levers option={option} weighing={weighing} level={2} />
       {appraisal && (
         <TitledSection level={2} title="Cautions">
           <Cautions cautions={appraisal.cautions} />
