@@ -35,6 +35,13 @@ describe('The working of an option', () => {
     expect(row(/Recruited in all/)).toHaveTextContent('50');
   });
 
+  it('says what its symbols stand for', async () => {
+    openWorking(stillfoot(), 2);
+    const symbols = await screen.findByLabelText('Symbols');
+    expect(symbols).toHaveTextContent('within-person correlation of two periods');
+    expect(symbols).not.toHaveTextContent('ICC');
+  });
+
   it('shows the schedule as a picture and as a table', async () => {
     openWorking(stillfoot(), 2);
     const schedule = await screen.findByRole('table', { name: 'Schedule' });

@@ -55,7 +55,7 @@ const useStyles = makeStyles({
 });
 
 /** The arithmetic as a statistician would write it down: formula, figures put in, value, source. */
-export function Steps({ steps }: { steps: readonly Step[] }) {
+export function Steps({ steps, arms }: { steps: readonly Step[]; arms: readonly string[] }) {
   const styles = useStyles();
   return (
     <ScrollRegion label="Steps, scrolls sideways" className={styles.card}>
@@ -71,7 +71,8 @@ export function Steps({ steps }: { steps: readonly Step[] }) {
           {steps.map(({ label, formula, substituted, value, source }) => (
             <tr key={label} className={styles.step}>
               <th scope="row" className={mergeClasses(styles.cell, styles.label)}>
-                <span className={styles.name}>{label}</span> <span className={styles.source}>{source}</span>
+                <span className={styles.name}>{withArms(label, arms)}</span>{' '}
+                <span className={styles.source}>{source}</span>
               </th>
               <td className={styles.cell}>
                 <div className={styles.maths}>
@@ -87,3 +88,9 @@ export function Steps({ steps }: { steps: readonly Step[] }) {
     </ScrollRegion>
   );
 }
+
+/** “Power, Active 2 against Control” with the arms by the study’s own names. */
+const withArms = (label: string, arms: readonly string[]): string =>
+  label
+    .replace(/\bactive (\d+)\b/gi, (found, arm) => arms[Number(arm)] ?? found)
+    .replace(/against Control\b/, `against ${arms[0] ?? 'Control'}`);

@@ -13,11 +13,13 @@ import { Cautions } from '../../weigh/components/cautions';
 import { OutOfReach } from '../../weigh/components/out-of-reach';
 import { assumptionsOf } from '../../weigh/model/assumptions';
 import type { Weighed, Weighing } from '../../weigh/model/weighing';
+import { symbolsOf } from '../model/symbols';
 import { AssumptionsTable } from './assumptions-table';
 import { ComparisonsTable } from './comparisons-table';
 import { RequestJson } from './request-json';
 import { ScheduleTable } from './schedule-table';
 import { Steps } from './steps';
+import { Symbols } from './symbols';
 
 const useStyles = makeStyles({
   page: {
@@ -92,7 +94,8 @@ export function Working({ option, weighing, weighHref, version }: WorkingProps) 
       </TitledSection>
       {request && !error && (
         <TitledSection level={2} title="Step by step">
-          <Steps steps={explain(request as AppraisalRequest)} />
+          <Steps steps={explain(request as AppraisalRequest)} arms={words.arms} />
+          <Symbols symbols={symbolsOf(request as AppraisalRequest)} />
         </TitledSection>
       )}
       <TitledSection
