@@ -45,7 +45,6 @@ test('appraisals of every family agree between the browser and the server', asyn
   await page.goto('/');
   await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
 
-  expect(appraisalRequests).toHaveLength(10);
   for (const [title, request] of appraisalRequests) {
     const browser = await page.evaluate(
       (asked) => (window as unknown as CalcInTheBrowser).SteelyardCalc.appraise(asked),

@@ -17,7 +17,8 @@ import { RemoveLine } from './remove-line';
 
 const useStyles = makeStyles({
   list: { display: 'grid', gridTemplateColumns: 'minmax(0, 1fr)', gap: '10px', marginTop: '12px' },
-  apart: { marginTop: '20px', maxWidth: '420px' },
+  // The longest of its choices does not decide its width.
+  apart: { gridTemplateColumns: 'minmax(0, 1fr)', marginTop: '20px', maxWidth: '420px' },
   told: { color: tokens.colorNeutralForeground2, maxWidth: '72ch' },
   skeleton: { display: 'grid', gap: '10px' },
 });
