@@ -84,7 +84,8 @@ export class Writers {
   private async write({ id, setBy: _, setAt: __, ...line }: PlanningValueView): Promise<void> {
     const { server } = this;
     for (let { version } = line; ; version += 1) {
-      const body = { ...line, version, value: 0.1 + Math.random() / 2 };
+      // A figure as people state one: SQLite may read the seventeenth digit back as its neighbour.
+      const body = { ...line, version, value: Number((0.1 + Math.random() / 2).toPrecision(12)) };
       const response = await server.ask('PUT', `/studies/${this.studyId}/planning-values`, this.cookie, body);
       if (!response) return;
       expect(response.status).toBe(200);
